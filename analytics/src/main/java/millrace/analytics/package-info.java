@@ -1,0 +1,2 @@
+/** Command line and plan of a run. */
+package millrace.analytics;

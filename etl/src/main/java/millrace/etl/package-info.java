@@ -1,0 +1,2 @@
+/** Reading a hospital extract by its contract: options, plan, exit statuses. */
+package millrace.etl;
