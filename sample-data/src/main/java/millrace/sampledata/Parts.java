@@ -1,0 +1,41 @@
+package millrace.sampledata;
+
+import millrace.sampledata.person.AdmissionCounts;
+
+/**
+ * How the patients are divided into parts, each one file per table. Depends on the size alone, so
+ * that the files do not depend on the machine.
+ *
+ * @param patients patients in all
+ * @param patientsPerPart patients of a part, whole blocks of {@link AdmissionCounts}
+ */
+record Parts(long patients, long patientsPerPart) {
+  private static final long FEWEST = 4;
+  private static final long MOST_PATIENTS = 10_000;
+
+  /**
+   * The division of a number of patients: at least 4 parts (2 for the smallest extracts), none
+   * above 10,000 patients.
+   */
+  static Parts of(long patients) {
+    long wanted = patients < 1000 ? FEWEST / 2 : FEWEST;
+    long even = (patients + wanted - 1) / wanted;
+    long blocks = (even + AdmissionCounts.BLOCK_PATIENTS - 1) / AdmissionCounts.BLOCK_PATIENTS;
+    return new Parts(patients, Math.min(MOST_PATIENTS, blocks * AdmissionCounts.BLOCK_PATIENTS));
+  }
+
+  /** Number of parts. */
+  int count() {
+    return (int) ((patients + patientsPerPart - 1) / patientsPerPart);
+  }
+
+  /** First patient of a part, counted from 0. */
+  long from(int part) {
+    return part * patientsPerPart;
+  }
+
+  /** Patient after the last of a part. */
+  long to(int part) {
+    return Math.min(patients, from(part) + patientsPerPart);
+  }
+}
