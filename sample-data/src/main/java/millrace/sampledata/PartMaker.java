@@ -5,6 +5,7 @@ import java.nio.file.Path;
 import millrace.sampledata.course.Chart;
 import millrace.sampledata.course.ChartMaker;
 import millrace.sampledata.course.RiskTally;
+import millrace.sampledata.dirt.DirtPlanter;
 import millrace.sampledata.person.AdmissionCounts;
 import millrace.sampledata.person.Person;
 import millrace.sampledata.person.PersonMaker;
@@ -22,10 +23,12 @@ final class PartMaker {
   private final AdmissionCounts counts;
   private final Buffers buffers = new Buffers();
   private final PatientWriter writer = new PatientWriter(buffers);
+  private final DirtPlanter dirt;
 
   PartMaker(long seed, AdmissionCounts counts) {
     this.seed = seed;
     this.counts = counts;
+    this.dirt = new DirtPlanter(seed, buffers);
   }
 
   /** Makes a part and writes its files. */
@@ -43,6 +46,7 @@ final class PartMaker {
           new PersonMaker(chance.split()).make(from + index, numbers[index], admissions);
       Chart chart = new ChartMaker(chance.split(), person, counted, uncounted).make();
       writer.write(chart, chance.split());
+      dirt.plant(from + index, chart, chance.split());
       InjuryRows.add(chart, injuries);
     }
     long rows = 0;

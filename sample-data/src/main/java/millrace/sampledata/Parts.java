@@ -1,13 +1,11 @@
 package millrace.sampledata;
 
-import millrace.sampledata.person.AdmissionCounts;
-
 /**
  * How the patients are divided into parts, each one file per table. Depends on the size alone, so
  * that the files do not depend on the machine.
  *
  * @param patients patients in all
- * @param patientsPerPart patients of a part, whole blocks of {@link AdmissionCounts}
+ * @param patientsPerPart patients of a part but the last
  */
 record Parts(long patients, long patientsPerPart) {
   private static final long FEWEST = 4;
@@ -20,8 +18,7 @@ record Parts(long patients, long patientsPerPart) {
   static Parts of(long patients) {
     long wanted = patients < 1000 ? FEWEST / 2 : FEWEST;
     long even = (patients + wanted - 1) / wanted;
-    long blocks = (even + AdmissionCounts.BLOCK_PATIENTS - 1) / AdmissionCounts.BLOCK_PATIENTS;
-    return new Parts(patients, Math.min(MOST_PATIENTS, blocks * AdmissionCounts.BLOCK_PATIENTS));
+    return new Parts(patients, Math.min(MOST_PATIENTS, even));
   }
 
   /** Number of parts. */

@@ -180,8 +180,8 @@ public final class ChartMaker {
     Admission admission = planned.extendedTo(Math.min(latest, wanted / 60 * 60));
     pressures.chart(planned.dischargedAt(), admission.dischargedAt(), false);
     rounds.rounds(admission, planned.dischargedAt(), admission.dischargedAt(), draws);
-    long soon = injury.injuredAt() + own.between(40, 300) * 60;
-    if (own.happens(0.8) && injury.origin().equals(Injury.HOSPITAL)) {
+    long soon = injury.injuredAt() + own.between(20, 150) * 60;
+    if (own.happens(0.9) && injury.origin().equals(Injury.HOSPITAL)) {
       draws.add(soon / 60 * 60);
       draws.sort(null);
     }

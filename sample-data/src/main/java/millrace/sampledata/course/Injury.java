@@ -63,7 +63,7 @@ public record Injury(
     long injuredAt =
         falling
             ? admittedAt - (long) (DAY * chance.within(1.5, 3.0))
-            : admittedAt + (long) (DAY * chance.within(-0.6, 1.2));
+            : admittedAt + (long) (DAY * chance.within(-0.6, 0.6));
     long peakAt =
         falling ? admittedAt - 8 * 3600 : injuredAt + (long) (DAY * chance.within(0.3, 1.0));
     return new Injury(

@@ -48,7 +48,7 @@ public final class AdmissionCounts {
   /**
    * The admissions of a run of patients.
    *
-   * @param from first patient, the start of a block
+   * @param from first patient
    * @param to patient after the last
    * @return entry {@code i} is the number of the first admission of patient {@code from + i}; one
    *     entry more than patients
@@ -56,10 +56,13 @@ public final class AdmissionCounts {
   public long[] firstNumbers(long from, long to) {
     long[] numbers = new long[(int) (to - from) + 1];
     long next = from / BLOCK_PATIENTS * BLOCK_ADMISSIONS;
-    int[] counts = {};
+    int[] counts = block(from / BLOCK_PATIENTS);
+    for (int index = 0; index < from % BLOCK_PATIENTS; index++) {
+      next += counts[index];
+    }
     for (long patient = from; patient < to; patient++) {
       int inBlock = (int) (patient % BLOCK_PATIENTS);
-      if (inBlock == 0 || patient == from) {
+      if (inBlock == 0) {
         counts = block(patient / BLOCK_PATIENTS);
       }
       numbers[(int) (patient - from)] = next;

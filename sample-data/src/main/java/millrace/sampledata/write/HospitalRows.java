@@ -20,6 +20,14 @@ public final class HospitalRows {
     for (CareUnit unit : CareUnit.values()) {
       units.begin(0).plain(unit.id()).text(unit.title()).plain(unit.kind().word()).text(SITE).end();
     }
+    units
+        .begin(0)
+        .plain(CareUnit.MED_1.id())
+        .text("Heron Ward (name until 2028)")
+        .plain("medical")
+        .text(SITE)
+        .end();
+    units.begin(0).plain("DAY").text("Day Surgery").plain("day-case").text(SITE).end();
     RowBuffer map = buffers.of(ExtractTable.CODE_MAP);
     map.begin(0).plain("results").plain("BIO-CREA").plain("loinc").plain("14682-9");
     map.text("Creatinine, serum, West laboratory").end();

@@ -55,6 +55,25 @@ public final class RowBuffer {
     return this;
   }
 
+  /**
+   * Writes the last row once more, as an interface that sends a message twice does.
+   *
+   * @param blanks blanks to put after it
+   */
+  public void repeatLast(String blanks) {
+    if (rows == 0) {
+      return;
+    }
+    int from = starts[rows - 1];
+    byte[] again = Arrays.copyOfRange(bytes, from, length);
+    begin((keys[rows - 1] >> INDEX_BITS) - TIME_OFFSET);
+    plain(again);
+    for (int index = 0; index < blanks.length(); index++) {
+      bytes[length++] = ' ';
+    }
+    end();
+  }
+
   /** Ends the row. */
   public void end() {
     rows++;

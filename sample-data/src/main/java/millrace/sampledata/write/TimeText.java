@@ -5,7 +5,7 @@ import java.time.LocalDate;
 import millrace.sampledata.scenario.Calendar;
 
 /** Wall-clock times as bytes, from a table of days. */
-final class TimeText {
+public final class TimeText {
   /** Bytes of a time with seconds. */
   static final int LONGEST = 19;
 
@@ -33,6 +33,17 @@ final class TimeText {
       next = twoDigits(bytes, next, rest % 60);
     }
     return next;
+  }
+
+  /**
+   * A time as the large tables print it.
+   *
+   * @param seconds seconds since the epoch
+   * @return {@code YYYY-MM-DDTHH:MM}
+   */
+  public static String minute(long seconds) {
+    byte[] bytes = new byte[LONGEST];
+    return new String(bytes, 0, put(bytes, 0, seconds, 'T', false), StandardCharsets.US_ASCII);
   }
 
   /** Puts the local date; returns the next position. */
