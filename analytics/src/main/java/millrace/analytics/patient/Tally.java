@@ -1,0 +1,39 @@
+package millrace.analytics.patient;
+
+import java.util.HashMap;
+import java.util.Map;
+import java.util.function.BiConsumer;
+
+/** Sums that are taken over all patients, by a key of words. Not for several threads. */
+public final class Tally {
+  /** What is summed. */
+  public enum Group {
+    /** Admissions by cohort class. */
+    FLOW,
+    /** Findings by kind, table, detail. */
+    FINDING,
+    /** Rows by table and fate. */
+    ACCOUNT,
+    /** Exposed and monitored days by number of subject. */
+    MONITORING,
+    /** Occupied seconds and results by month and unit. */
+    TESTING
+  }
+
+  /** A key: a group and up to three words. */
+  public record Key(Group group, String first, String second, String third) {}
+
+  private final Map<Key, Long> sums = new HashMap<>();
+
+  /** Adds to a sum. */
+  public void add(Group group, String first, String second, String third, long more) {
+    if (more != 0) {
+      sums.merge(new Key(group, first, second, third), more, Long::sum);
+    }
+  }
+
+  /** All sums, in no order. */
+  public void forEach(BiConsumer<Key, Long> visitor) {
+    sums.forEach(visitor);
+  }
+}
