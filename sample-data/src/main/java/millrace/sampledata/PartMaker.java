@@ -28,7 +28,7 @@ final class PartMaker {
   PartMaker(long seed, AdmissionCounts counts) {
     this.seed = seed;
     this.counts = counts;
-    this.dirt = new DirtPlanter(seed, buffers);
+    this.dirt = new DirtPlanter(seed, counts.patients(), buffers);
   }
 
   /** Makes a part and writes its files. */

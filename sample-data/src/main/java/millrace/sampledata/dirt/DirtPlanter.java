@@ -9,8 +9,9 @@ import millrace.sampledata.scenario.Chance;
 import millrace.sampledata.write.Buffers;
 
 /**
- * Plants one fault beside the rows of every patient: among as many patients in a row as there are
- * faults each occurs once, in an order drawn anew, so that the smallest extract shows them all.
+ * Plants a fault beside the rows of every fourth patient, of every patient in a small extract:
+ * among as many faults in a row as there are kinds each occurs once, in an order drawn anew, so
+ * that the smallest extract shows them all.
  */
 public final class DirtPlanter {
   private static final List<Fault> FAULTS =
@@ -23,9 +24,11 @@ public final class DirtPlanter {
           .flatMap(List::stream)
           .toList();
 
+  private static final long SMALL_PATIENTS = 1000;
   private static final long STREAM = 1L << 40;
 
   private final long seed;
+  private final long stride;
   private final Buffers buffers;
   private long turn = -1;
   private List<Fault> order = List.of();
@@ -34,26 +37,32 @@ public final class DirtPlanter {
    * A planter into the buffers of a part.
    *
    * @param seed seed of the extract
+   * @param patients patients of the extract
    * @param buffers the buffers
    */
-  public DirtPlanter(long seed, Buffers buffers) {
+  public DirtPlanter(long seed, long patients, Buffers buffers) {
     this.seed = seed;
+    this.stride = patients < SMALL_PATIENTS ? 1 : 4;
     this.buffers = buffers;
   }
 
   /**
-   * Plants the fault of a patient.
+   * Plants the fault of a patient whose turn it is.
    *
    * @param number number of the patient
    * @param chart what happened; its rows are in the buffers already
    * @param chance dice of their own, so that faults change nothing else
    */
   public void plant(long number, Chart chart, Chance chance) {
-    if (number / FAULTS.size() != turn) {
-      turn = number / FAULTS.size();
+    if (number % stride != 0) {
+      return;
+    }
+    long planted = number / stride;
+    if (planted / FAULTS.size() != turn) {
+      turn = planted / FAULTS.size();
       order = drawOrder(Chance.of(seed, STREAM + turn));
     }
-    order.get((int) (number % FAULTS.size())).plant(chart, chance, buffers);
+    order.get((int) (planted % FAULTS.size())).plant(chart, chance, buffers);
   }
 
   private static List<Fault> drawOrder(Chance chance) {

@@ -20,6 +20,7 @@ final class OtherFaults {
         (chart, chance, buffers) -> replacement(chart, chance, buffers, "modality", "CVVHDF"),
         (chart, chance, buffers) ->
             replacement(chart, chance, buffers, "ended_at", "2024-01-01T00:00"),
+        OtherFaults::bareSession,
         (chart, chance, buffers) -> measure(chart, chance, buffers, "weight_kg", "72 kg"),
         (chart, chance, buffers) -> measure(chart, chance, buffers, "measured_at", ""),
         (chart, chance, buffers) -> urine(chart, chance, buffers, "volume_ml", "x2"),
@@ -52,6 +53,22 @@ final class OtherFaults {
         .set("purpose", "acute")
         .set(column, value)
         .write(buffers, moment.at());
+  }
+
+  /** A session known by its day only, for those who have sessions anyway. */
+  private static void bareSession(Chart chart, Chance chance, Buffers buffers) {
+    Moment moment = Moment.of(chart, chance);
+    String day = moment.text().substring(0, 10);
+    if (chart.person().kidneys().onMaintenance()) {
+      new Draft(ExtractTable.KIDNEY_REPLACEMENTS)
+          .set("patient_id", moment.patientId())
+          .set("started_at", day)
+          .set("modality", "intermittent")
+          .set("purpose", "maintenance")
+          .write(buffers, moment.at());
+    } else {
+      condition(chart, chance, buffers, "recorded_at", day);
+    }
   }
 
   private static void measure(

@@ -29,6 +29,7 @@ final class StayFaults {
             admission(chart, chance, buffers, "discharged_at", "2024-01-01T00:00"),
         StayFaults::secondAdmission,
         StayFaults::plannedAdmission,
+        StayFaults::overlappingAdmission,
         (chart, chance, buffers) -> stay(chart, chance, buffers, "unit_id", "WARD-9"),
         (chart, chance, buffers) -> stay(chart, chance, buffers, "left_at", "2024-01-01T00:00"),
         (chart, chance, buffers) -> stay(chart, chance, buffers, "entered_at", ""));
@@ -75,6 +76,19 @@ final class StayFaults {
         .set("discharged_at", "")
         .set("discharge_status", "")
         .write(buffers, late);
+  }
+
+  /**
+   * An admission within another; only of patients who are in no rate, since it takes over what
+   * happens in its time.
+   */
+  private static void overlappingAdmission(Chart chart, Chance chance, Buffers buffers) {
+    if (chart.person().inRates()) {
+      plannedAdmission(chart, chance, buffers);
+      return;
+    }
+    Moment moment = Moment.of(chart, chance);
+    draft(moment).write(buffers, moment.at());
   }
 
   private static Draft draft(Moment moment) {

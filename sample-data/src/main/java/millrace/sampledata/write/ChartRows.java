@@ -49,7 +49,20 @@ final class ChartRows {
       case UREA -> row.number(result.value()).plain("mg/dL");
       case BICARBONATE -> row.number(result.value()).plain("mmol/L");
     }
-    row.plain("final").plain(result.setting()).end();
+    row.plain(status(result)).plain(result.setting()).end();
+  }
+
+  /**
+   * Most say final, some leave it to the default, a few were corrected before the extract was
+   * drawn.
+   */
+  private static String status(LabResult result) {
+    long minute = result.collectedAt() / 60;
+    return minute % 199 == 0 ? "corrected" : minute % 17 == 0 ? "" : "final";
+  }
+
+  private static String action(Dose dose) {
+    return dose.action().equals("given") && dose.startedAt() / 60 % 19 == 0 ? "" : dose.action();
   }
 
   private void dose(byte[] patientId, Dose dose) {
@@ -61,7 +74,7 @@ final class ChartRows {
     row.plain(DRUG_NAMES[drug.ordinal()]).plain(drug.route());
     row.minute(dose.startedAt()).minute(dose.endedAt());
     row.plain(drug.dose()).plain(drug.doseUnit());
-    row.plain(dose.action()).plain(dose.ordered() ? "ordered" : "administered").end();
+    row.plain(action(dose)).plain(dose.ordered() ? "ordered" : "administered").end();
   }
 
   private void reading(byte[] patientId, Reading reading) {
