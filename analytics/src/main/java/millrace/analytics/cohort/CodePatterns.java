@@ -6,7 +6,10 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 
-/** Condition codes of a policy, compared without point and case; {@code *} at the end makes a prefix (methods 6). */
+/**
+ * Condition codes of a policy, compared without point and case; {@code *} at the end makes a prefix
+ * (methods 6).
+ */
 final class CodePatterns {
   private final Set<String> codes = new HashSet<>();
   private final List<String> prefixes = new ArrayList<>();

@@ -39,20 +39,24 @@ public final class CohortRule {
     if (ageYears(timeline, stretch) < policy.minAgeYears()) {
       return CohortClass.UNDER_AGE;
     }
-    if (hasCondition(timeline, stretch, dialysisIcd10, dialysisIcd9) || onMaintenance(timeline, stretch)) {
+    if (hasCondition(timeline, stretch, dialysisIcd10, dialysisIcd9)
+        || onMaintenance(timeline, stretch)) {
       return CohortClass.MAINTENANCE_DIALYSIS;
     }
     if (hasCondition(timeline, stretch, transplantIcd10, transplantIcd9)) {
       return CohortClass.TRANSPLANT;
     }
-    return assessable(timeline.line(), stretch, admission) ? CohortClass.ELIGIBLE : CohortClass.NOT_ASSESSABLE;
+    return assessable(timeline.line(), stretch, admission)
+        ? CohortClass.ELIGIBLE
+        : CohortClass.NOT_ASSESSABLE;
   }
 
   /** Completed years between the local dates of birth and admission. */
   public int ageYears(PatientTimeline timeline, Stretch stretch) {
     return (int)
         ChronoUnit.YEARS.between(
-            timeline.patient().birthDate(), Instant.ofEpochSecond(stretch.from()).atZone(zone).toLocalDate());
+            timeline.patient().birthDate(),
+            Instant.ofEpochSecond(stretch.from()).atZone(zone).toLocalDate());
   }
 
   /** Unmasked results belonging to an admission. */

@@ -20,13 +20,23 @@ import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVParser;
 import org.apache.commons.csv.CSVRecord;
 
-/** Reads the watchlist and the combinations: the hospital's own files, or those that ship with the program. */
+/**
+ * Reads the watchlist and the combinations: the hospital's own files, or those that ship with the
+ * program.
+ */
 public final class DrugLists {
   private static final List<String> WATCHLIST_COLUMNS =
-      List.of("agent", "atc", "class", "mechanism", "routes", "lag_hours", "look_back_days", "burden");
+      List.of(
+          "agent", "atc", "class", "mechanism", "routes", "lag_hours", "look_back_days", "burden");
   private static final List<String> COMBINATION_COLUMNS = List.of("name", "members");
   private static final CSVFormat FORMAT =
-      CSVFormat.RFC4180.builder().setHeader().setSkipHeaderRecord(true).setTrim(true).setIgnoreEmptyLines(true).get();
+      CSVFormat.RFC4180
+          .builder()
+          .setHeader()
+          .setSkipHeaderRecord(true)
+          .setTrim(true)
+          .setIgnoreEmptyLines(true)
+          .get();
 
   private DrugLists() {}
 
@@ -69,11 +79,15 @@ public final class DrugLists {
     List<Combination> combinations = new ArrayList<>();
     for (CSVRecord record : records(file, name, COMBINATION_COLUMNS)) {
       Line line = new Line(name, record);
-      List<String> members = Arrays.stream(line.text("members").split(";")).map(String::strip).toList();
+      List<String> members =
+          Arrays.stream(line.text("members").split(";")).map(String::strip).toList();
       for (String member : members) {
-        // A member that a hospital's own shorter watchlist lacks can never expose; the shipped combinations stay listed.
+        // A member that a hospital's own shorter watchlist lacks can never expose; the shipped
+        // combinations stay listed.
         if (!known.contains(member) && file.isPresent()) {
-          throw line.wrong("members", "names " + member + ", which the watchlist has neither as a class nor as an agent");
+          throw line.wrong(
+              "members",
+              "names " + member + ", which the watchlist has neither as a class nor as an agent");
         }
       }
       combinations.add(new Combination(line.text("name"), members));
@@ -85,12 +99,18 @@ public final class DrugLists {
     try (CSVParser parser = CSVParser.parse(text(file, name), FORMAT)) {
       for (String column : columns) {
         if (!parser.getHeaderMap().containsKey(column)) {
-          throw new PolicyException(name + ", line 1: the column " + column + " is missing; the header is " + String.join(",", columns));
+          throw new PolicyException(
+              name
+                  + ", line 1: the column "
+                  + column
+                  + " is missing; the header is "
+                  + String.join(",", columns));
         }
       }
       return parser.getRecords();
     } catch (IOException | IllegalArgumentException e) {
-      throw new PolicyException(name + " cannot be read as CSV; check its name, header and quotes", e);
+      throw new PolicyException(
+          name + " cannot be read as CSV; check its name, header and quotes", e);
     }
   }
 
@@ -127,7 +147,13 @@ public final class DrugLists {
             Arrays.stream(Route.values())
                 .filter(r -> r.word().equals(word.strip()))
                 .findFirst()
-                .orElseThrow(() -> wrong("routes", "names " + word.strip() + ", which is no route of the extract contract")));
+                .orElseThrow(
+                    () ->
+                        wrong(
+                            "routes",
+                            "names "
+                                + word.strip()
+                                + ", which is no route of the extract contract")));
       }
       return routes;
     }
@@ -153,7 +179,8 @@ public final class DrugLists {
     }
 
     PolicyException wrong(String column, String what) {
-      return new PolicyException(file + ", row " + record.getRecordNumber() + ": " + column + " " + what);
+      return new PolicyException(
+          file + ", row " + record.getRecordNumber() + ": " + column + " " + what);
     }
   }
 }

@@ -9,8 +9,9 @@ import millrace.etl.record.Administration;
 import millrace.etl.record.DoseBasis;
 
 /**
- * The exposed time of one patient: for each agent, class and combination the union over the doses, and the burden
- * (methods 7). The same sets make numerator and denominator, so that no time is immortal.
+ * The exposed time of one patient: for each agent, class and combination the union over the doses,
+ * and the burden (methods 7). The same sets make numerator and denominator, so that no time is
+ * immortal.
  */
 public final class Exposure {
   /** The highest burden that is told apart: three or more. */
@@ -20,14 +21,16 @@ public final class Exposure {
   private final Map<Integer, IntervalSet> sets;
   private final List<IntervalSet> burdenSets;
 
-  private Exposure(List<WatchedDose> doses, Map<Integer, IntervalSet> sets, List<IntervalSet> burdenSets) {
+  private Exposure(
+      List<WatchedDose> doses, Map<Integer, IntervalSet> sets, List<IntervalSet> burdenSets) {
     this.doses = doses;
     this.sets = sets;
     this.burdenSets = burdenSets;
   }
 
   /** The exposure of a patient's kept administrations. */
-  public static Exposure of(List<Administration> administrations, Subjects subjects, boolean countOrdered) {
+  public static Exposure of(
+      List<Administration> administrations, Subjects subjects, boolean countOrdered) {
     List<WatchedDose> doses = new ArrayList<>();
     for (Administration dose : administrations) {
       if (!dose.atc().isEmpty() && (countOrdered || dose.basis() == DoseBasis.ADMINISTERED)) {
@@ -50,8 +53,10 @@ public final class Exposure {
       }
     }
     Map<Integer, IntervalSet> sets = new TreeMap<>();
-    byAgent.forEach((name, i) -> put(sets, subjects.number(Subjects.Level.AGENT, name), IntervalSet.union(i)));
-    byClass.forEach((name, i) -> put(sets, subjects.number(Subjects.Level.CLASS, name), IntervalSet.union(i)));
+    byAgent.forEach(
+        (name, i) -> put(sets, subjects.number(Subjects.Level.AGENT, name), IntervalSet.union(i)));
+    byClass.forEach(
+        (name, i) -> put(sets, subjects.number(Subjects.Level.CLASS, name), IntervalSet.union(i)));
     for (Combination combination : subjects.combinations()) {
       put(
           sets,
@@ -59,7 +64,9 @@ public final class Exposure {
           together(combination, byAgent, byClass));
     }
     return new Exposure(
-        doses, sets, burden.values().stream().map(IntervalSet::union).filter(s -> !s.isEmpty()).toList());
+        doses,
+        sets,
+        burden.values().stream().map(IntervalSet::union).filter(s -> !s.isEmpty()).toList());
   }
 
   /** Exposed time by number of subject; subjects that never expose are not in it. */
@@ -72,7 +79,10 @@ public final class Exposure {
     return doses;
   }
 
-  /** How many distinct agents marked for the burden expose at an instant, at most {@link #HIGHEST_BURDEN}. */
+  /**
+   * How many distinct agents marked for the burden expose at an instant, at most {@link
+   * #HIGHEST_BURDEN}.
+   */
   public int burdenAt(long instant) {
     int agents = 0;
     for (IntervalSet set : burdenSets) {
@@ -91,7 +101,8 @@ public final class Exposure {
     return burden == HIGHEST_BURDEN ? "3+" : Integer.toString(burden);
   }
 
-  private static void add(Map<String, List<IntervalSet.Interval>> sets, String name, WatchedDose dose) {
+  private static void add(
+      Map<String, List<IntervalSet.Interval>> sets, String name, WatchedDose dose) {
     sets.computeIfAbsent(name, n -> new ArrayList<>()).add(dose.exposed());
   }
 

@@ -6,9 +6,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 
-/**
- * Everything whose exposed time is counted, numbered: agents, classes, combinations.
- */
+/** Everything whose exposed time is counted, numbered: agents, classes, combinations. */
 public final class Subjects implements Serializable {
   private static final long serialVersionUID = 1L;
 
@@ -51,7 +49,10 @@ public final class Subjects implements Serializable {
     this.mechanisms = new HashMap<>(watchlist.mechanismOfAgent());
     watchlist.agents().forEach(name -> add(Level.AGENT, name));
     watchlist.classes().forEach(name -> add(Level.CLASS, name));
-    combinations.stream().map(Combination::name).sorted().forEach(name -> add(Level.COMBINATION, name));
+    combinations.stream()
+        .map(Combination::name)
+        .sorted()
+        .forEach(name -> add(Level.COMBINATION, name));
   }
 
   /** All subjects by number. */

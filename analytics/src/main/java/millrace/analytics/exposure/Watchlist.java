@@ -9,7 +9,8 @@ import java.util.TreeSet;
 import millrace.etl.record.Route;
 
 /**
- * The watched drugs, found by ATC code: the longest matching code wins, then the route must be listed (methods 7).
+ * The watched drugs, found by ATC code: the longest matching code wins, then the route must be
+ * listed (methods 7).
  */
 public final class Watchlist implements Serializable {
   private static final long serialVersionUID = 1L;

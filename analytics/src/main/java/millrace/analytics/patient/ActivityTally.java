@@ -12,8 +12,8 @@ import millrace.analytics.timeline.PatientTimeline;
 import millrace.analytics.timeline.Stretch;
 
 /**
- * How much creatinine is looked for: results and occupied time by month and unit (methods 6), and exposed days with a
- * result within 24 h of noon (methods 7).
+ * How much creatinine is looked for: results and occupied time by month and unit (methods 6), and
+ * exposed days with a result within 24 h of noon (methods 7).
  */
 final class ActivityTally {
   private static final long NEAR_NOON_SECONDS = 86_400;

@@ -42,39 +42,52 @@ final class EpisodeRows {
   EpisodeRows(RunContext context, LocalDays days) {
     this.context = context;
     this.links = new LinkFinder(context.subjects(), context.cover().zone());
-    this.vasopressors = new Vasopressors(context.policy().pressure(), context.policy().exposure().countOrdered());
+    this.vasopressors =
+        new Vasopressors(context.policy().pressure(), context.policy().exposure().countOrdered());
     this.days = days;
   }
 
   /** What an episode of a patient is described with. */
   record Setting(
-      PatientTimeline timeline, List<CohortClass> classes, Exposure exposure, PressureSeries pressure) {}
+      PatientTimeline timeline,
+      List<CohortClass> classes,
+      Exposure exposure,
+      PressureSeries pressure) {}
 
   EpisodeRow row(Episode episode, boolean counted, Setting setting) {
     Span span = episode.span();
     long onset = span.onset();
     PatientTimeline timeline = setting.timeline();
-    PressureMeasures measures = PressureMeasures.before(onset, setting.pressure(), context.policy().pressure());
+    PressureMeasures measures =
+        PressureMeasures.before(onset, setting.pressure(), context.policy().pressure());
     boolean inAdmission = span.admission() != Membership.NONE;
     long dayBefore = onset - context.policy().cohort().dayBeforeSeconds();
     return new EpisodeRow(
         "",
         timeline.patient().patientId(),
         inAdmission
-            ? Optional.of(timeline.membership().stretches().get(span.admission()).admission().admissionId())
+            ? Optional.of(
+                timeline.membership().stretches().get(span.admission()).admission().admissionId())
             : Optional.empty(),
-        inAdmission ? Optional.of(setting.classes().get(span.admission()).word()) : Optional.empty(),
+        inAdmission
+            ? Optional.of(setting.classes().get(span.admission()).word())
+            : Optional.empty(),
         Instant.ofEpochSecond(onset),
         episode.origin().word(),
         span.evidence().stream().map(Enum::name).sorted().collect(Collectors.joining(";")),
         span.reference(),
-        value(timeline.line(), span.onsetResult() < 0 ? OptionalInt.empty() : OptionalInt.of(span.onsetResult())),
+        value(
+            timeline.line(),
+            span.onsetResult() < 0 ? OptionalInt.empty() : OptionalInt.of(span.onsetResult())),
         value(timeline.line(), episode.peakResult()),
         episode.peakResult().isPresent()
-            ? Optional.of(Instant.ofEpochSecond(timeline.line().at()[episode.peakResult().getAsInt()]))
+            ? Optional.of(
+                Instant.ofEpochSecond(timeline.line().at()[episode.peakResult().getAsInt()]))
             : Optional.empty(),
         episode.stage(),
-        span.closing() < context.cover().to() ? Optional.of(Instant.ofEpochSecond(span.closing())) : Optional.empty(),
+        span.closing() < context.cover().to()
+            ? Optional.of(Instant.ofEpochSecond(span.closing()))
+            : Optional.empty(),
         episode.transientCourse() ? "transient" : "persistent",
         episode.prolonged(),
         episode.outcome().map(Outcome::word),
@@ -86,7 +99,8 @@ final class EpisodeRows {
         links.exposing(setting.exposure(), Subjects.Level.COMBINATION, onset),
         measures.lowSeconds() / SECONDS_OF_A_MINUTE,
         measures.lowestMapThirdsNanoMmHg().isPresent()
-            ? OptionalDouble.of(PressureMeasures.mmHg(measures.lowestMapThirdsNanoMmHg().getAsLong()))
+            ? OptionalDouble.of(
+                PressureMeasures.mmHg(measures.lowestMapThirdsNanoMmHg().getAsLong()))
             : OptionalDouble.empty(),
         measures.areaMmHgMinutes(),
         measures.observedSeconds() / SECONDS_OF_AN_HOUR,
@@ -116,7 +130,9 @@ final class EpisodeRows {
 
   /** A pressure in mmHg, or empty. */
   static OptionalDouble mmHg(long nano) {
-    return nano == BloodPressure.NONE ? OptionalDouble.empty() : OptionalDouble.of(nano / (double) BloodPressure.NANOS);
+    return nano == BloodPressure.NONE
+        ? OptionalDouble.empty()
+        : OptionalDouble.of(nano / (double) BloodPressure.NANOS);
   }
 
   private LinkRow link(String patientId, Episode episode, Link link) {
@@ -133,6 +149,8 @@ final class EpisodeRows {
   }
 
   private static OptionalLong value(CreatinineLine line, OptionalInt result) {
-    return result.isPresent() ? OptionalLong.of(line.nanomolesPerLitre()[result.getAsInt()]) : OptionalLong.empty();
+    return result.isPresent()
+        ? OptionalLong.of(line.nanomolesPerLitre()[result.getAsInt()])
+        : OptionalLong.empty();
   }
 }

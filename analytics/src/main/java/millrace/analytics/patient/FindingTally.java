@@ -14,7 +14,10 @@ import millrace.etl.record.Administration;
 import millrace.etl.record.BloodPressure;
 import millrace.etl.record.CreatinineResult;
 
-/** Findings that need a patient's whole line: overlaps, rival results, rows whose admission is another by time (methods 2). */
+/**
+ * Findings that need a patient's whole line: overlaps, rival results, rows whose admission is
+ * another by time (methods 2).
+ */
 final class FindingTally {
   private static final int OLDEST_YEARS = 120;
 
@@ -46,7 +49,8 @@ final class FindingTally {
     }
   }
 
-  private void disagreement(Membership membership, long at, String admissionId, ContractTable table) {
+  private void disagreement(
+      Membership membership, long at, String admissionId, ContractTable table) {
     if (admissionId.isEmpty()) {
       return;
     }
@@ -56,7 +60,8 @@ final class FindingTally {
             && membership.stretches().get(number).admission().admissionId().equals(admissionId);
     OptionalInt own =
         IntStream.range(0, membership.stretches().size())
-            .filter(i -> membership.stretches().get(i).admission().admissionId().equals(admissionId))
+            .filter(
+                i -> membership.stretches().get(i).admission().admissionId().equals(admissionId))
             .findFirst();
     // Another patient's admission was counted when the row was checked.
     if (!agrees && own.isPresent()) {

@@ -28,7 +28,10 @@ import millrace.etl.record.Seconds;
 import millrace.etl.record.SourceLine;
 import millrace.etl.record.UnitStay;
 
-/** Writes the rows behind an episode's page: every kept row of the patient with its source and what became of it. */
+/**
+ * Writes the rows behind an episode's page: every kept row of the patient with its source and what
+ * became of it.
+ */
 final class LineRows {
   private final RunContext context;
 
@@ -50,7 +53,8 @@ final class LineRows {
               timeline.resultStates().get(i).word(),
               admission == Membership.NONE
                   ? Optional.empty()
-                  : Optional.of(timeline.membership().stretches().get(admission).admission().admissionId()),
+                  : Optional.of(
+                      timeline.membership().stretches().get(admission).admission().admissionId()),
               result.setting().word(),
               file(result.source()),
               result.source().line()));
@@ -59,7 +63,9 @@ final class LineRows {
   }
 
   List<DoseLine> doses(PatientTimeline timeline) {
-    return timeline.administrations().stream().map(d -> dose(timeline.patient().patientId(), d)).toList();
+    return timeline.administrations().stream()
+        .map(d -> dose(timeline.patient().patientId(), d))
+        .toList();
   }
 
   List<PressureLine> pressures(PatientTimeline timeline, PressureSeries series) {
@@ -127,14 +133,18 @@ final class LineRows {
   }
 
   static Optional<Instant> instant(long epochSecond) {
-    return Seconds.given(epochSecond) ? Optional.of(Instant.ofEpochSecond(epochSecond)) : Optional.empty();
+    return Seconds.given(epochSecond)
+        ? Optional.of(Instant.ofEpochSecond(epochSecond))
+        : Optional.empty();
   }
 
   private DoseLine dose(String patientId, Administration dose) {
     Watchlist watchlist = context.subjects().watchlist();
     List<WatchedDrug> byCode = dose.atc().isEmpty() ? List.of() : watchlist.byCode(dose.atc());
-    List<WatchedDrug> exposing = dose.atc().isEmpty() ? List.of() : watchlist.exposing(dose.atc(), dose.route());
-    boolean ordered = dose.basis() == DoseBasis.ORDERED && !context.policy().exposure().countOrdered();
+    List<WatchedDrug> exposing =
+        dose.atc().isEmpty() ? List.of() : watchlist.exposing(dose.atc(), dose.route());
+    boolean ordered =
+        dose.basis() == DoseBasis.ORDERED && !context.policy().exposure().countOrdered();
     String note = "";
     if (byCode.isEmpty()) {
       note = "not watched";

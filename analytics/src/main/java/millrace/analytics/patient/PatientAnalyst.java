@@ -4,7 +4,6 @@ import java.time.Instant;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
-import java.util.Map;
 import java.util.OptionalLong;
 import java.util.Set;
 import millrace.analytics.baseline.BaselineFinder;
@@ -35,8 +34,8 @@ import millrace.etl.check.Quarantined;
 import millrace.etl.record.DischargeStatus;
 
 /**
- * Runs the rules of methods 2 to 8 over one patient after another, and adds to the run's cells and tallies as it goes. Not
- * for several threads.
+ * Runs the rules of methods 2 to 8 over one patient after another, and adds to the run's cells and
+ * tallies as it goes. Not for several threads.
  */
 public final class PatientAnalyst {
   private final RunContext context;
@@ -61,9 +60,12 @@ public final class PatientAnalyst {
     this.timelines = new TimelineBuilder(context.policy().line(), coversTo);
     this.baselines = new BaselineFinder(context.policy().baseline(), context.cover().zone());
     this.cohorts = new CohortRule(context.policy().cohort(), context.cover().zone());
-    this.risks = new RiskRule(context.policy().episode().hospitalOnsetSeconds(), context.cover().from(), coversTo);
+    this.risks =
+        new RiskRule(
+            context.policy().episode().hospitalOnsetSeconds(), context.cover().from(), coversTo);
     this.riskCells =
-        new RiskCells(days, context.unitNumbers(), context.policy().cohort().dayBeforeSeconds(), cells);
+        new RiskCells(
+            days, context.unitNumbers(), context.policy().cohort().dayBeforeSeconds(), cells);
     this.pressures = new PressureReader(context.policy().pressure(), context.units());
     this.episodeRows = new EpisodeRows(context, days);
     this.lineRows = new LineRows(context);
@@ -86,7 +88,16 @@ public final class PatientAnalyst {
     List<QuarantineRow> quarantine = rows.quarantine().stream().map(this::quarantined).toList();
     if (rows.patient().isEmpty()) {
       return new PatientOutcome(
-          List.of(), List.of(), List.of(), List.of(), quarantine, List.of(), List.of(), List.of(), List.of(), List.of());
+          List.of(),
+          List.of(),
+          List.of(),
+          List.of(),
+          quarantine,
+          List.of(),
+          List.of(),
+          List.of(),
+          List.of(),
+          List.of());
     }
     PatientTimeline timeline = timelines.build(rows);
     int admissions = timeline.membership().stretches().size();
@@ -97,14 +108,19 @@ public final class PatientAnalyst {
       classes.add(cohorts.classOf(timeline, i));
     }
     SpanFinder walk = new SpanFinder(context.policy(), timeline, ownBaselines);
-    EpisodeDescriber describer = new EpisodeDescriber(context.policy(), timeline, context.cover().zone());
+    EpisodeDescriber describer =
+        new EpisodeDescriber(context.policy(), timeline, context.cover().zone());
     List<Episode> episodes = walk.find().stream().map(describer::describe).toList();
     Exposure exposure =
-        Exposure.of(timeline.administrations(), context.subjects(), context.policy().exposure().countOrdered());
+        Exposure.of(
+            timeline.administrations(),
+            context.subjects(),
+            context.policy().exposure().countOrdered());
     PressureSeries pressure = pressures.read(timeline);
     List<AdmissionRow> admissionRows = new ArrayList<>();
     Set<Integer> counted = new HashSet<>();
-    RiskCells.Strata strata = new RiskCells.Strata(timeline.occupancy(), exposure, pressure.recent());
+    RiskCells.Strata strata =
+        new RiskCells.Strata(timeline.occupancy(), exposure, pressure.recent());
     for (int i = 0; i < admissions; i++) {
       OptionalLong atRiskSeconds = OptionalLong.empty();
       if (classes.get(i) == CohortClass.ELIGIBLE) {
@@ -157,7 +173,11 @@ public final class PatientAnalyst {
   }
 
   private AdmissionRow admission(
-      PatientTimeline timeline, int number, CohortClass cohort, OptionalLong baseline, OptionalLong atRiskSeconds) {
+      PatientTimeline timeline,
+      int number,
+      CohortClass cohort,
+      OptionalLong baseline,
+      OptionalLong atRiskSeconds) {
     Stretch stretch = timeline.membership().stretches().get(number);
     return new AdmissionRow(
         stretch.admission().admissionId(),
@@ -173,7 +193,8 @@ public final class PatientAnalyst {
         atRiskSeconds);
   }
 
-  private GradualRiseRow gradual(PatientTimeline timeline, List<CohortClass> classes, GradualRise rise) {
+  private GradualRiseRow gradual(
+      PatientTimeline timeline, List<CohortClass> classes, GradualRise rise) {
     return new GradualRiseRow(
         timeline.patient().patientId(),
         timeline.membership().stretches().get(rise.admission()).admission().admissionId(),

@@ -21,7 +21,8 @@ public final class Tally {
   }
 
   /** A key: a group and up to three words. */
-  public record Key(Group group, String first, String second, String third) {}
+  public record Key(Group group, String first, String second, String third)
+      implements java.io.Serializable {}
 
   private final Map<Key, Long> sums = new HashMap<>();
 
@@ -30,6 +31,11 @@ public final class Tally {
     if (more != 0) {
       sums.merge(new Key(group, first, second, third), more, Long::sum);
     }
+  }
+
+  /** A sum; 0 when nothing was added. */
+  public long sum(Key key) {
+    return sums.getOrDefault(key, 0L);
   }
 
   /** All sums, in no order. */

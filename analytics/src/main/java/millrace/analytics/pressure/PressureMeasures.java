@@ -32,7 +32,9 @@ public record PressureMeasures(
     long lowest = Long.MAX_VALUE;
     BigInteger area = BigInteger.ZERO;
     List<Reading> readings = series.readings();
-    for (int i = firstReaching(readings, from); i < readings.size() && readings.get(i).from() < onset; i++) {
+    for (int i = firstReaching(readings, from);
+        i < readings.size() && readings.get(i).from() < onset;
+        i++) {
       Reading reading = readings.get(i);
       long seconds = Math.min(reading.to(), onset) - Math.max(reading.from(), from);
       if (seconds > 0) {
@@ -52,7 +54,11 @@ public record PressureMeasures(
       spells += spell.from() < onset && spell.to() > from ? 1 : 0;
     }
     return new PressureMeasures(
-        observed, low, lowest == Long.MAX_VALUE ? OptionalLong.empty() : OptionalLong.of(lowest), area, spells);
+        observed,
+        low,
+        lowest == Long.MAX_VALUE ? OptionalLong.empty() : OptionalLong.of(lowest),
+        area,
+        spells);
   }
 
   /** Area under the floor in mmHg times minutes. */
@@ -60,9 +66,13 @@ public record PressureMeasures(
     return areaThirdsNanoMmHgSeconds.doubleValue() / THIRDS_NANO / 60;
   }
 
-  /** Depth under the floor in mmHg, averaged over the observed time; 0 when nothing was observed. */
+  /**
+   * Depth under the floor in mmHg, averaged over the observed time; 0 when nothing was observed.
+   */
   public double timeWeightedDepthMmHg() {
-    return observedSeconds == 0 ? 0 : areaThirdsNanoMmHgSeconds.doubleValue() / THIRDS_NANO / observedSeconds;
+    return observedSeconds == 0
+        ? 0
+        : areaThirdsNanoMmHgSeconds.doubleValue() / THIRDS_NANO / observedSeconds;
   }
 
   /** A mean in thirds of a billionth of a mmHg as mmHg. */

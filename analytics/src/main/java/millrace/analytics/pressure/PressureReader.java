@@ -10,7 +10,10 @@ import millrace.etl.record.BloodPressure;
 import millrace.etl.record.Unit;
 import millrace.etl.record.UnitKind;
 
-/** Makes a patient's pressures a series: which are used, how long each stands, which are low (methods 8). */
+/**
+ * Makes a patient's pressures a series: which are used, how long each stands, which are low
+ * (methods 8).
+ */
 public final class PressureReader {
   private final PressurePolicy policy;
   private final Map<String, Unit> units;
@@ -31,7 +34,8 @@ public final class PressureReader {
 
   /** The series of a patient. */
   public PressureSeries read(PatientTimeline timeline) {
-    List<BloodPressure> used = new UsedReadings(policy.arterialLineReachSeconds()).of(timeline.pressures());
+    List<BloodPressure> used =
+        new UsedReadings(policy.arterialLineReachSeconds()).of(timeline.pressures());
     List<Reading> readings = new ArrayList<>(used.size());
     for (int i = 0; i < used.size(); i++) {
       BloodPressure pressure = used.get(i);

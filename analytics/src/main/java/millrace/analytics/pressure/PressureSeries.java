@@ -44,6 +44,8 @@ public record PressureSeries(List<Reading> readings, List<Spell> spells, Interva
   }
 
   private static boolean continues(Reading last, Reading next, PressurePolicy policy) {
-    return next.low() && next.admission() == last.admission() && next.from() - last.to() <= policy.spellGapSeconds();
+    return next.low()
+        && next.admission() == last.admission()
+        && next.from() - last.to() <= policy.spellGapSeconds();
   }
 }

@@ -6,8 +6,9 @@ import millrace.etl.record.BloodPressure;
 import millrace.etl.record.PressureMethod;
 
 /**
- * Which readings are used (methods 8): set aside are readings with neither mean nor systolic, then cuff and unknown ones
- * near an arterial line; at one instant the one with a mean stands, then the lowest.
+ * Which readings are used (methods 8): set aside are readings with neither mean nor systolic, then
+ * cuff and unknown ones near an arterial line; at one instant the one with a mean stands, then the
+ * lowest.
  *
  * @param arterialLineReachSeconds how near
  */
@@ -39,7 +40,9 @@ record UsedReadings(long arterialLineReachSeconds) {
 
   private boolean nearLine(List<BloodPressure> usable, int at) {
     long instant = usable.get(at).measuredAt();
-    for (int i = at - 1; i >= 0 && instant - usable.get(i).measuredAt() <= arterialLineReachSeconds; i--) {
+    for (int i = at - 1;
+        i >= 0 && instant - usable.get(i).measuredAt() <= arterialLineReachSeconds;
+        i--) {
       if (usable.get(i).method() == PressureMethod.ARTERIAL_LINE) {
         return true;
       }

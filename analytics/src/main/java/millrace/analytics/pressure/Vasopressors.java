@@ -9,7 +9,10 @@ import millrace.etl.record.DoseBasis;
 import millrace.etl.record.Route;
 import millrace.etl.record.Seconds;
 
-/** Whether a vasopressor ran in the window before an onset: a flag of its own, beside the pressures (methods 8). */
+/**
+ * Whether a vasopressor ran in the window before an onset: a flag of its own, beside the pressures
+ * (methods 8).
+ */
 public final class Vasopressors {
   private final Set<String> codes;
   private final long windowSeconds;

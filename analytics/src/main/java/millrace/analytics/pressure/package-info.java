@@ -1,2 +1,5 @@
-/** Low blood pressure: readings, how long they stand, spells, measures before an onset (methods 8). Imports neither Spark nor Vaadin nor JDBC. */
+/**
+ * Low blood pressure: readings, how long they stand, spells, measures before an onset (methods 8).
+ * Imports neither Spark nor Vaadin nor JDBC.
+ */
 package millrace.analytics.pressure;

@@ -4,8 +4,8 @@ import java.util.OptionalDouble;
 import millrace.analytics.mart.ClassPressureRow;
 
 /**
- * The four cells of a drug class and recent hypotension, and the relative excess risk due to interaction: the rate ratio of
- * both, less that of each alone, plus one (methods 8; Rothman 1986).
+ * The four cells of a drug class and recent hypotension, and the relative excess risk due to
+ * interaction: the rate ratio of both, less that of each alone, plus one (methods 8; Rothman 1986).
  */
 public final class ClassPressure {
   private ClassPressure() {}
@@ -19,7 +19,11 @@ public final class ClassPressure {
    * @param exposedWith exposed time with it
    */
   public static ClassPressureRow row(
-      String drugClass, RiskSum wholeWithout, RiskSum wholeWith, RiskSum exposedWithout, RiskSum exposedWith) {
+      String drugClass,
+      RiskSum wholeWithout,
+      RiskSum wholeWith,
+      RiskSum exposedWithout,
+      RiskSum exposedWith) {
     RiskSum neither = wholeWithout.minus(exposedWithout);
     RiskSum pressure = wholeWith.minus(exposedWith);
     return new ClassPressureRow(
@@ -35,8 +39,13 @@ public final class ClassPressure {
         excess(neither, exposedWithout, pressure, exposedWith));
   }
 
-  private static OptionalDouble excess(RiskSum neither, RiskSum drug, RiskSum pressure, RiskSum both) {
-    boolean noTime = neither.seconds() <= 0 || drug.seconds() <= 0 || pressure.seconds() <= 0 || both.seconds() <= 0;
+  private static OptionalDouble excess(
+      RiskSum neither, RiskSum drug, RiskSum pressure, RiskSum both) {
+    boolean noTime =
+        neither.seconds() <= 0
+            || drug.seconds() <= 0
+            || pressure.seconds() <= 0
+            || both.seconds() <= 0;
     if (noTime || neither.episodes() == 0) {
       return OptionalDouble.empty();
     }

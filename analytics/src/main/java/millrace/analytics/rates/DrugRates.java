@@ -13,7 +13,10 @@ import millrace.analytics.stats.MantelHaenszelRateRatio;
 import millrace.analytics.stats.PersonTimeTable;
 import millrace.analytics.stats.RateRatio;
 
-/** Exposed against unexposed incidence of the subjects of one level (methods 7). Associations, not causes. */
+/**
+ * Exposed against unexposed incidence of the subjects of one level (methods 7). Associations, not
+ * causes.
+ */
 public final class DrugRates {
   private static final double CONFIDENCE = 0.95;
 
@@ -33,7 +36,10 @@ public final class DrugRates {
   /** A subject and its exposed time by stratum. */
   public record Exposed(String subject, Map<Stratum, RiskSum> byStratum) {}
 
-  /** The rows of a level, in the order of the subjects, with Benjamini–Hochberg values over the level. */
+  /**
+   * The rows of a level, in the order of the subjects, with Benjamini–Hochberg values over the
+   * level.
+   */
   public List<DrugRateRow> rows(String level, List<Exposed> subjects) {
     List<DrugRateRow> rows = new ArrayList<>();
     subjects.forEach(subject -> rows.add(row(level, subject)));
@@ -59,7 +65,8 @@ public final class DrugRates {
     Ratio ratio = tooFew ? Ratio.NONE : ratio(exposed, unexposed);
     Optional<MantelHaenszelRateRatio> stratified =
         tooFew ? Optional.empty() : Optional.of(MantelHaenszelRateRatio.of(tables(subject)));
-    OptionalDouble mhRatio = stratified.map(MantelHaenszelRateRatio::ratio).orElse(OptionalDouble.empty());
+    OptionalDouble mhRatio =
+        stratified.map(MantelHaenszelRateRatio::ratio).orElse(OptionalDouble.empty());
     Optional<Limits> mhLimits = stratified.flatMap(MantelHaenszelRateRatio::limits);
     return new DrugRateRow(
         level,
@@ -85,7 +92,8 @@ public final class DrugRates {
           RiskSum exposed = subject.byStratum().getOrDefault(stratum, RiskSum.ZERO);
           RiskSum unexposed = all.minus(exposed);
           tables.add(
-              new PersonTimeTable(exposed.episodes(), exposed.days(), unexposed.episodes(), unexposed.days()));
+              new PersonTimeTable(
+                  exposed.episodes(), exposed.days(), unexposed.episodes(), unexposed.days()));
         });
     return tables;
   }
@@ -93,7 +101,8 @@ public final class DrugRates {
   private static Ratio ratio(RiskSum exposed, RiskSum unexposed) {
     RateRatio crude =
         RateRatio.of(
-            new PersonTimeTable(exposed.episodes(), exposed.days(), unexposed.episodes(), unexposed.days()),
+            new PersonTimeTable(
+                exposed.episodes(), exposed.days(), unexposed.episodes(), unexposed.days()),
             CONFIDENCE);
     boolean noneUnexposed = unexposed.episodes() == 0;
     return new Ratio(
@@ -103,9 +112,14 @@ public final class DrugRates {
         OptionalDouble.of(crude.pMid()));
   }
 
-  private record Ratio(OptionalDouble ratio, OptionalDouble lower, OptionalDouble upper, OptionalDouble p) {
+  private record Ratio(
+      OptionalDouble ratio, OptionalDouble lower, OptionalDouble upper, OptionalDouble p) {
     static final Ratio NONE =
-        new Ratio(OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty());
+        new Ratio(
+            OptionalDouble.empty(),
+            OptionalDouble.empty(),
+            OptionalDouble.empty(),
+            OptionalDouble.empty());
   }
 
   private static OptionalDouble lower(Optional<Limits> limits) {

@@ -5,7 +5,8 @@ import millrace.analytics.stats.Limits;
 import millrace.analytics.stats.PoissonRate;
 
 /**
- * Episodes per 1,000 patient-days at risk with Garwood limits; all empty without time at risk (methods 6, 12).
+ * Episodes per 1,000 patient-days at risk with Garwood limits; all empty without time at risk
+ * (methods 6, 12).
  *
  * @param rate per 1,000 patient-days
  * @param lower lower 95 % limit

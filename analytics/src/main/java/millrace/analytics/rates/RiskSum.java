@@ -15,12 +15,14 @@ public record RiskSum(long seconds, long episodes, long stage2plus) {
 
   /** Both together. */
   public RiskSum plus(RiskSum other) {
-    return new RiskSum(seconds + other.seconds, episodes + other.episodes, stage2plus + other.stage2plus);
+    return new RiskSum(
+        seconds + other.seconds, episodes + other.episodes, stage2plus + other.stage2plus);
   }
 
   /** What is left without a part. */
   public RiskSum minus(RiskSum part) {
-    return new RiskSum(seconds - part.seconds, episodes - part.episodes, stage2plus - part.stage2plus);
+    return new RiskSum(
+        seconds - part.seconds, episodes - part.episodes, stage2plus - part.stage2plus);
   }
 
   /** Patient-days at risk. */

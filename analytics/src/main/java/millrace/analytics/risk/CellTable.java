@@ -3,8 +3,8 @@ package millrace.analytics.risk;
 import java.util.Arrays;
 
 /**
- * Sums by cell: seconds at risk, counted episodes, those of stage 2 or 3. Open addressing on packed cells, since a run adds
- * hundreds of millions of times. Not for several threads.
+ * Sums by cell: seconds at risk, counted episodes, those of stage 2 or 3. Open addressing on packed
+ * cells, since a run adds hundreds of millions of times. Not for several threads.
  */
 public final class CellTable {
   private static final int FIRST_SIZE = 1 << 12;

@@ -11,7 +11,12 @@ package millrace.analytics.risk;
  * @param burden 0 to 3
  */
 public record RiskCell(
-    long epochDay, int unit, Attribution attribution, int subject, boolean recentHypotension, int burden) {
+    long epochDay,
+    int unit,
+    Attribution attribution,
+    int subject,
+    boolean recentHypotension,
+    int burden) {
   /** The subject of cells that hold the whole time at risk. */
   public static final int ALL = -1;
 
@@ -44,6 +49,7 @@ public record RiskCell(
 
   /** The cell of another subject. */
   static long withSubject(long packed, int subject) {
-    return (packed & ~((long) SUBJECT_BITS << SUBJECT_SHIFT)) | (long) (subject + 1) << SUBJECT_SHIFT;
+    return (packed & ~((long) SUBJECT_BITS << SUBJECT_SHIFT))
+        | (long) (subject + 1) << SUBJECT_SHIFT;
   }
 }

@@ -9,8 +9,9 @@ import millrace.analytics.timeline.IntervalSet;
 import millrace.analytics.timeline.Occupancy;
 
 /**
- * Cuts time at risk at every change of day, unit, recent hypotension and burden and adds it up by cell, once as a whole
- * and once for each exposing subject; episodes go to the cells of their onset (methods 6 to 8). Not for several threads.
+ * Cuts time at risk at every change of day, unit, recent hypotension and burden and adds it up by
+ * cell, once as a whole and once for each exposing subject; episodes go to the cells of their onset
+ * (methods 6 to 8). Not for several threads.
  */
 public final class RiskCells {
   private final LocalDays days;
@@ -21,9 +22,11 @@ public final class RiskCells {
   /**
    * Cells into a table.
    *
-   * @param unitNumbers number of every unit, with that of {@link Occupancy#UNASSIGNED} and {@link Occupancy#NOWHERE}
+   * @param unitNumbers number of every unit, with that of {@link Occupancy#UNASSIGNED} and {@link
+   *     Occupancy#NOWHERE}
    */
-  public RiskCells(LocalDays days, Map<String, Integer> unitNumbers, long dayBeforeSeconds, CellTable table) {
+  public RiskCells(
+      LocalDays days, Map<String, Integer> unitNumbers, long dayBeforeSeconds, CellTable table) {
     this.days = days;
     this.unitNumbers = unitNumbers;
     this.dayBeforeSeconds = dayBeforeSeconds;

@@ -6,4 +6,4 @@ package millrace.etl.check;
  * @param rule the first rule broken
  * @param column the column that broke it
  */
-public record Broken(Rule rule, String column) {}
+public record Broken(Rule rule, String column) implements java.io.Serializable {}

@@ -11,4 +11,5 @@ import millrace.etl.record.SourceLine;
  * @param broken what it broke
  * @param raw its text
  */
-public record Quarantined(ContractTable table, SourceLine source, Broken broken, String raw) {}
+public record Quarantined(ContractTable table, SourceLine source, Broken broken, String raw)
+    implements java.io.Serializable {}
