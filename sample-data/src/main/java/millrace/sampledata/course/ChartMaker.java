@@ -25,6 +25,7 @@ public final class ChartMaker {
   private final LabRounds rounds;
   private final LabBench bench;
   private final ReplacementPlan replacements;
+  private final Aftermath aftermath;
   private boolean unsettled;
 
   /**
@@ -44,6 +45,7 @@ public final class ChartMaker {
     this.rounds = new LabRounds(chance.split(), person);
     this.bench = new LabBench(chance.split(), person, course, chart.results());
     this.replacements = new ReplacementPlan(chance.split(), chart.replacements());
+    this.aftermath = new Aftermath(rounds, replacements);
   }
 
   /**
@@ -83,67 +85,64 @@ public final class ChartMaker {
   }
 
   private void admit(Admission planned, long next) {
-    PressureCourse pressures = new PressureCourse(chance.split(), person, planned);
-    pressures.chart(planned.admittedAt(), planned.dischargedAt(), true);
-    List<Spell> spells = SpellFinder.find(planned, pressures.readings());
-    List<Dose> doses = new Prescriber(chance.split(), person, planned).prescribe(spells);
-    List<Long> draws = rounds.routine(planned);
+    Visit visit = plan(planned, next);
     Chance own = chance.split();
-    HazardWalk walk = walk(planned, spells, doses, draws);
+    boolean inRates = person.inRates() && visit.assessable() && !unsettled;
     Admission admission = planned;
     Optional<Injury> injury = Optional.empty();
     if (person.kidneys().onMaintenance()) {
       long earliest = chart.admissions().isEmpty() ? 0 : lastDischarge();
       replacements.maintenance(person.kidneys(), planned, earliest);
     } else {
-      injury = injure(own, planned, walk, draws);
+      injury = injure(own, visit, walk(visit, inRates ? counted : uncounted));
       if (injury.isPresent()) {
-        admission = suffer(own, injury.get(), planned, next, pressures, draws, doses);
+        course.add(injury.get());
+        admission = aftermath.suffer(own, injury.get(), visit);
       } else if (planned.dischargedAt() - planned.admittedAt() > 13 * DAY && own.happens(0.08)) {
         course.creep(planned.admittedAt() + DAY, planned.dischargedAt());
       }
     }
-    write(admission, pressures, doses, draws);
+    write(admission, visit);
     if (injury.isPresent()) {
-      note(injury.get(), admission, inRates(planned, draws));
+      note(injury.get(), admission, inRates);
     }
     followUp(own, admission, next);
   }
 
-  private HazardWalk walk(
-      Admission planned, List<Spell> spells, List<Dose> doses, List<Long> draws) {
+  private Visit plan(Admission planned, long next) {
+    PressureCourse pressures = new PressureCourse(chance.split(), person, planned);
+    pressures.chart(planned.admittedAt(), planned.dischargedAt(), true);
+    List<Spell> spells = SpellFinder.find(planned, pressures.readings());
+    List<Dose> doses = new Prescriber(chance.split(), person, planned).prescribe(spells);
+    return new Visit(planned, next, pressures, spells, doses, rounds.routine(planned));
+  }
+
+  private HazardWalk walk(Visit visit, RiskTally tally) {
     Exposures exposures = new Exposures();
     chart.doses().forEach(exposures::add);
-    doses.forEach(exposures::add);
-    return new HazardWalk(
-        planned, exposures, spells, inRates(planned, draws) ? counted : uncounted);
+    visit.doses().forEach(exposures::add);
+    return new HazardWalk(visit.planned(), exposures, visit.spells(), tally);
   }
 
-  private boolean inRates(Admission planned, List<Long> draws) {
-    boolean assessable = draws.size() >= 2 && draws.get(draws.size() - 1) >= planned.admittedAt();
-    return person.inRates() && assessable && !unsettled;
-  }
-
-  private Optional<Injury> injure(
-      Chance own, Admission planned, HazardWalk walk, List<Long> draws) {
-    if (unsettled || draws.size() < 2) {
+  private Optional<Injury> injure(Chance own, Visit visit, HazardWalk walk) {
+    if (unsettled || visit.draws().size() < 2) {
       return Optional.empty();
     }
+    Admission planned = visit.planned();
+    long admittedAt = planned.admittedAt();
     if (person.kidneys() != Kidneys.TRANSPLANT
         && own.happens(shareInjuredBefore(planned.profile()))) {
-      return Optional.of(
-          Injury.beforeHospital(own, planned.admittedAt(), walk.stretchAt(planned.admittedAt())));
+      return Optional.of(Injury.beforeHospital(own, admittedAt, walk.stretchAt(admittedAt)));
     }
-    long from = planned.admittedAt() + 2 * DAY;
     long to = Math.min(planned.dischargedAt(), Calendar.TO);
-    OptionalLong injuredAt = walk.walk(from, to, own.exponential(1));
+    OptionalLong injuredAt = walk.walk(admittedAt + 2 * DAY, to, own.exponential(1));
     if (injuredAt.isEmpty()) {
       return Optional.empty();
     }
     long at = injuredAt.getAsLong();
-    boolean testedDaily = draws.stream().anyMatch(draw -> draw >= at - 40 * HOUR && draw < at);
     return Optional.of(
-        Injury.inHospital(own, at, person.baselineMgDl(), testedDaily, walk.stretchAt(at)));
+        Injury.inHospital(
+            own, at, person.baselineMgDl(), visit.drawnBefore(at), walk.stretchAt(at)));
   }
 
   private static double shareInjuredBefore(Profile profile) {
@@ -156,57 +155,17 @@ public final class ChartMaker {
     };
   }
 
-  /**
-   * Lives on after an injury: the stay grows, blood is drawn soon, harmful drugs are often stopped.
-   */
-  private Admission suffer(
-      Chance own,
-      Injury injury,
-      Admission planned,
-      long next,
-      PressureCourse pressures,
-      List<Long> draws,
-      List<Dose> doses) {
-    course.add(injury);
-    long latest = next == Long.MAX_VALUE ? next : next - DAY;
-    long wanted = Math.max(injury.injuredAt() + 30 * HOUR, planned.admittedAt());
-    if (injury.origin().equals(Injury.HOSPITAL) && own.happens(0.6)) {
-      wanted = injury.injuredAt() + own.between(2 * 1440, 7 * 1440) * 60;
-    }
-    if (replacements.needed(injury)) {
-      long over = replacements.acute(injury, planned, Math.min(latest, wanted + 6 * DAY));
-      wanted = Math.max(wanted, over + 3 * DAY);
-    }
-    Admission admission = planned.extendedTo(Math.min(latest, wanted / 60 * 60));
-    pressures.chart(planned.dischargedAt(), admission.dischargedAt(), false);
-    rounds.rounds(admission, planned.dischargedAt(), admission.dischargedAt(), draws);
-    long soon = injury.injuredAt() + own.between(20, 150) * 60;
-    if (own.happens(0.9) && injury.origin().equals(Injury.HOSPITAL)) {
-      draws.add(soon / 60 * 60);
-      draws.sort(null);
-    }
-    if (own.happens(0.5)) {
-      long stop = injury.injuredAt() + DAY;
-      doses.removeIf(dose -> dose.startedAt() > stop && dose.drug().drugClass().rateRatio() > 1);
-    }
-    return admission;
-  }
-
-  private void write(
-      Admission admission, PressureCourse pressures, List<Dose> doses, List<Long> draws) {
+  private void write(Admission admission, Visit visit) {
     chart.admissions().add(admission);
-    pressures.readings().stream()
-        .filter(reading -> reading.at() < admission.dischargedAt())
+    long end = Math.min(admission.dischargedAt(), Calendar.TO);
+    visit.pressures().readings().stream()
+        .filter(reading -> reading.at() < end)
         .forEach(chart.readings()::add);
-    pressures.companions().stream()
-        .filter(reading -> reading.at() < Math.min(admission.dischargedAt(), Calendar.TO))
+    visit.pressures().companions().stream()
+        .filter(reading -> reading.at() < end)
         .forEach(chart.readings()::add);
-    chart.doses().addAll(doses);
-    for (long at : draws) {
-      if (at < Calendar.TO && at < admission.dischargedAt()) {
-        bench.inside(admission, at);
-      }
-    }
+    chart.doses().addAll(visit.doses());
+    visit.draws().stream().filter(at -> at < end).forEach(at -> bench.inside(admission, at));
   }
 
   private void note(Injury injury, Admission admission, boolean inRates) {

@@ -8,6 +8,7 @@ import millrace.sampledata.scenario.Planted;
 
 /** The exposed times of one patient, by drug, over all admissions. */
 final class Exposures {
+  private static final long HOUR = 3600;
   private static final int DRUGS = Drug.values().length;
 
   private final List<Window> windows = new ArrayList<>();
@@ -16,16 +17,17 @@ final class Exposures {
   /** Adds a dose; the doses of one drug must come in order of time. */
   void add(Dose dose) {
     Drug drug = dose.drug();
-    if (!dose.exposes() || drug.drugClass() == DrugClass.UNWATCHED) {
+    DrugClass drugClass = drug.drugClass();
+    if (!dose.exposes() || drugClass == DrugClass.UNWATCHED) {
       return;
     }
-    long from = dose.startedAt() + drug.lagSeconds();
-    long to = Math.max(dose.startedAt(), dose.endedAt()) + drug.lookBackSeconds();
+    long from = dose.startedAt() + drugClass.lagHours() * HOUR;
+    long to = Math.max(dose.startedAt(), dose.endedAt()) + drugClass.lookBackDays() * 24 * HOUR;
     Window last = latest[drug.ordinal()];
     if (last != null && from <= last.to) {
       last.to = Math.max(last.to, to);
     } else {
-      latest[drug.ordinal()] = new Window(from, to, Planted.bit(drug.drugClass()));
+      latest[drug.ordinal()] = new Window(from, to, Planted.bit(drugClass));
       windows.add(latest[drug.ordinal()]);
     }
   }

@@ -39,9 +39,9 @@ final class Prescriber {
   List<Dose> prescribe(List<Spell> spells) {
     Profile profile = admission.profile();
     if (profile == Profile.SHORT) {
-      sometimes(0.7, Drug.PARACETAMOL, 0, 0.2, 1, 1);
-      sometimes(0.2, Drug.IOHEXOL, 0, 0.1, 1, 1);
-      sometimes(0.15, Drug.IBUPROFEN, 0, 0.2, 1, 1);
+      sometimes(0.7, Drug.PARACETAMOL, span(0, 0.2, 1, 1));
+      sometimes(0.2, Drug.IOHEXOL, span(0, 0.1, 1, 1));
+      sometimes(0.15, Drug.IBUPROFEN, span(0, 0.2, 1, 1));
       return sorted();
     }
     infections(profile);
@@ -55,15 +55,15 @@ final class Prescriber {
 
   private void infections(Profile profile) {
     double more = profile == Profile.MATERNITY ? 0.2 : profile == Profile.CHILD ? 0.6 : 1;
-    boolean vancomycin = sometimes(0.1 * more, Drug.VANCOMYCIN, 0, 2.5, 4, 9);
-    sometimes((vancomycin ? 0.5 : 0.12) * more, Drug.PIPERACILLIN_TAZOBACTAM, 0, 2.5, 4, 9);
+    boolean vancomycin = sometimes(0.1 * more, Drug.VANCOMYCIN, span(0, 2.5, 4, 9));
+    sometimes((vancomycin ? 0.5 : 0.12) * more, Drug.PIPERACILLIN_TAZOBACTAM, span(0, 2.5, 4, 9));
     if (chance.happens(0.08 * more)) {
       double draw = chance.uniform();
       Drug drug = draw < 0.7 ? Drug.GENTAMICIN : draw < 0.9 ? Drug.AMIKACIN : Drug.TOBRAMYCIN;
-      course(drug, 0, 2.5, 3, 8);
+      course(drug, span(0, 2.5, 3, 8));
     }
-    sometimes(0.04 * more, Drug.CO_TRIMOXAZOLE, 0, 2, 5, 10);
-    sometimes(profile == Profile.SURGICAL ? 0.5 : 0.18, Drug.CEFUROXIME, 0, 1, 1, 4);
+    sometimes(0.04 * more, Drug.CO_TRIMOXAZOLE, span(0, 2, 5, 10));
+    sometimes(profile == Profile.SURGICAL ? 0.5 : 0.18, Drug.CEFUROXIME, span(0, 1, 1, 4));
   }
 
   private void habits(Profile profile) {
@@ -71,16 +71,16 @@ final class Prescriber {
       return;
     }
     if (chance.happens(0.24)) {
-      course(chance.happens(0.6) ? Drug.RAMIPRIL : Drug.LOSARTAN, 0, 1, 4, 20);
+      course(chance.happens(0.6) ? Drug.RAMIPRIL : Drug.LOSARTAN, span(0, 1, 4, 20));
     }
-    sometimes(0.06, Drug.INDAPAMIDE, 0, 1, 4, 20);
-    sometimes(0.33, Drug.PANTOPRAZOLE, 0, 1.5, 3, 20);
-    sometimes(0.45, Drug.ENOXAPARIN, 0, 1, 3, 20);
-    sometimes(0.08, Drug.SALBUTAMOL, 0, 1, 3, 8);
+    sometimes(0.06, Drug.INDAPAMIDE, span(0, 1, 4, 20));
+    sometimes(0.33, Drug.PANTOPRAZOLE, span(0, 1.5, 3, 20));
+    sometimes(0.45, Drug.ENOXAPARIN, span(0, 1, 3, 20));
+    sometimes(0.08, Drug.SALBUTAMOL, span(0, 1, 3, 8));
   }
 
   private void pain(Profile profile) {
-    sometimes(0.55, Drug.PARACETAMOL, 0, 1, 2, 9);
+    sometimes(0.55, Drug.PARACETAMOL, span(0, 1, 2, 9));
     double nsaid =
         switch (profile) {
           case SURGICAL -> 0.26;
@@ -91,7 +91,8 @@ final class Prescriber {
     if (chance.happens(nsaid)) {
       double draw = chance.uniform();
       course(
-          draw < 0.6 ? Drug.IBUPROFEN : draw < 0.85 ? Drug.DICLOFENAC : Drug.KETOROLAC, 0, 2, 2, 6);
+          draw < 0.6 ? Drug.IBUPROFEN : draw < 0.85 ? Drug.DICLOFENAC : Drug.KETOROLAC,
+          span(0, 2, 2, 6));
     }
   }
 
@@ -99,36 +100,33 @@ final class Prescriber {
     sometimes(
         profile == Profile.CRITICAL ? 0.25 : profile == Profile.CHILD ? 0.02 : 0.13,
         Drug.IOHEXOL,
-        0,
-        4,
-        1,
-        1);
-    sometimes(profile == Profile.CANCER ? 0.05 : 0.005, Drug.AMPHOTERICIN, 0, 2, 4, 10);
+        span(0, 4, 1, 1));
+    sometimes(profile == Profile.CANCER ? 0.05 : 0.005, Drug.AMPHOTERICIN, span(0, 2, 4, 10));
     if (profile == Profile.CANCER) {
-      sometimes(0.12, Drug.CISPLATIN, 0, 1.5, 1, 2);
+      sometimes(0.12, Drug.CISPLATIN, span(0, 1.5, 1, 2));
     }
-    sometimes(0.02, Drug.ACICLOVIR, 0, 1.5, 4, 8);
+    sometimes(0.02, Drug.ACICLOVIR, span(0, 1.5, 4, 8));
     if (person.kidneys() == Kidneys.TRANSPLANT) {
-      course(Drug.TACROLIMUS, 0, 0.5, 10, 30);
+      course(Drug.TACROLIMUS, span(0, 0.5, 10, 30));
     }
   }
 
   private void oddRoutes() {
-    sometimes(0.02, Drug.GENTAMICIN_EYE, 0, 2, 3, 7);
-    sometimes(0.01, Drug.KETOROLAC_EYE, 0, 2, 3, 7);
-    sometimes(0.015, Drug.VANCOMYCIN_ORAL, 0, 2, 5, 10);
-    sometimes(0.008, Drug.TOBRAMYCIN_INHALED, 0, 2, 5, 10);
-    sometimes(0.015, Drug.ACICLOVIR_ORAL, 0, 2, 5, 7);
-    sometimes(0.12, Drug.FLUSH, 0, 1, 1, 4);
+    sometimes(0.02, Drug.GENTAMICIN_EYE, span(0, 2, 3, 7));
+    sometimes(0.01, Drug.KETOROLAC_EYE, span(0, 2, 3, 7));
+    sometimes(0.015, Drug.VANCOMYCIN_ORAL, span(0, 2, 5, 10));
+    sometimes(0.008, Drug.TOBRAMYCIN_INHALED, span(0, 2, 5, 10));
+    sometimes(0.015, Drug.ACICLOVIR_ORAL, span(0, 2, 5, 7));
+    sometimes(0.12, Drug.FLUSH, span(0, 1, 1, 4));
   }
 
   private void afterLowPressure(List<Spell> spells) {
     boolean low = person.pressureProne() && !spells.isEmpty();
     if (low && chance.happens(0.72)) {
       double days = (spells.get(0).endAt() - admission.admittedAt()) / (double) DAY;
-      course(Drug.FUROSEMIDE, days + 0.1, days + 0.3, 4, 12);
+      course(Drug.FUROSEMIDE, span(days + 0.1, days + 0.3, 4, 12));
     } else if (!person.pressureProne() && person.population() != Population.CHILD) {
-      sometimes(0.035, Drug.FUROSEMIDE, 0, 2, 3, 9);
+      sometimes(0.035, Drug.FUROSEMIDE, span(0, 2, 3, 9));
     }
     for (Spell spell : spells) {
       boolean intensive = admission.unitAt(spell.startAt()).kind() == UnitKind.CRITICAL_CARE;
@@ -144,18 +142,18 @@ final class Prescriber {
     }
   }
 
-  private boolean sometimes(
-      double probability, Drug drug, double fromDay, double toDay, int fewestDays, int mostDays) {
+  private boolean sometimes(double probability, Drug drug, Span span) {
     boolean happens = chance.happens(probability);
     if (happens) {
-      course(drug, fromDay, toDay, fewestDays, mostDays);
+      course(drug, span);
     }
     return happens;
   }
 
-  private void course(Drug drug, double fromDay, double toDay, int fewestDays, int mostDays) {
-    long at = admission.admittedAt() + (long) (chance.within(fromDay, toDay) * 96) * 900 + 1200;
-    long days = fewestDays + chance.below(mostDays - fewestDays + 1);
+  private void course(Drug drug, Span span) {
+    long at =
+        admission.admittedAt() + (long) (chance.within(span.fromDay, span.toDay) * 96) * 900 + 1200;
+    long days = span.fewestDays + chance.below(span.mostDays - span.fewestDays + 1);
     long stop = Math.min(end, at + days * DAY - HOUR);
     if (drug.everySeconds() >= DAY && days == 1) {
       stop = Math.min(end, at + 1);
@@ -187,4 +185,11 @@ final class Prescriber {
     doses.sort(Comparator.comparingLong(Dose::startedAt));
     return doses;
   }
+
+  private static Span span(double fromDay, double toDay, int fewestDays, int mostDays) {
+    return new Span(fromDay, toDay, fewestDays, mostDays);
+  }
+
+  /** When a course starts, in days after admission, and how many days it lasts. */
+  private record Span(double fromDay, double toDay, int fewestDays, int mostDays) {}
 }

@@ -125,6 +125,8 @@ public final class TruthReport {
         json.object()
             .field("class", drugClass.word())
             .field("planted_ratio", drugClass.rateRatio());
+        json.field("lag_hours", drugClass.lagHours())
+            .field("look_back_days", drugClass.lookBackDays());
         json.field("confounded_by_low_pressure", drugClass == DrugClass.LOOP_DIURETIC);
         subject(drugClass.ordinal());
       }
