@@ -8,7 +8,7 @@ import java.util.OptionalLong;
 /**
  * An episode of acute kidney injury. Methods 4, 5, 7, 8.
  *
- * @param episodeId the run's own id, safe in a URL: e- and a number in order of onset
+ * @param episodeId the run's own id, safe in a URL: e-, the part of the table, and a number in it
  * @param patientId identifier in the extract
  * @param admissionId admission the onset belongs to
  * @param cohortClass class of that admission
@@ -71,4 +71,40 @@ public record EpisodeRow(
     boolean vasopressor,
     boolean recentHypotension,
     boolean counted,
-    String month) {}
+    String month) {
+  /** The same row with that id. */
+  public EpisodeRow withEpisodeId(String id) {
+    return new EpisodeRow(
+        id,
+        patientId,
+        admissionId,
+        cohortClass,
+        onsetAt,
+        origin,
+        evidence,
+        referenceNanomolesPerLitre,
+        onsetNanomolesPerLitre,
+        peakNanomolesPerLitre,
+        peakAt,
+        stage,
+        closedAt,
+        course,
+        prolonged,
+        outcome,
+        unitAtOnset,
+        unitDayBefore,
+        linkedAgents,
+        linkedClasses,
+        burden,
+        combinations,
+        minutesLow,
+        lowestMap,
+        areaUnderFloor,
+        observedHours,
+        spells,
+        vasopressor,
+        recentHypotension,
+        counted,
+        month);
+  }
+}

@@ -3,6 +3,7 @@ package millrace.analytics.patient;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.function.BiConsumer;
+import millrace.etl.check.Findings;
 
 /** Sums that are taken over all patients, by a key of words. Not for several threads. */
 public final class Tally {
@@ -31,6 +32,13 @@ public final class Tally {
     if (more != 0) {
       sums.merge(new Key(group, first, second, third), more, Long::sum);
     }
+  }
+
+  /** Adds findings. */
+  public void addFindings(Findings findings) {
+    findings.forEach(
+        (key, rows) ->
+            add(Group.FINDING, key.kind().word(), key.table().tableName(), key.detail(), rows));
   }
 
   /** A sum; 0 when nothing was added. */

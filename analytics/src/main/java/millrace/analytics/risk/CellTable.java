@@ -31,6 +31,14 @@ public final class CellTable {
     seconds[slot(packed)] += more;
   }
 
+  /** Adds sums. */
+  public void add(long packed, long moreSeconds, int moreEpisodes, int moreStage2plus) {
+    int slot = slot(packed);
+    seconds[slot] += moreSeconds;
+    episodes[slot] += moreEpisodes;
+    stage2plus[slot] += moreStage2plus;
+  }
+
   /** Adds a counted episode. */
   public void addEpisode(long packed, boolean stage2or3) {
     int slot = slot(packed);

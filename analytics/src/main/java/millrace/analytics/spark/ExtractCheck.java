@@ -72,16 +72,7 @@ public final class ExtractCheck {
             s ->
                 tally.add(
                     s.key().group(), s.key().first(), s.key().second(), s.key().third(), s.sum()));
-    extract
-        .findings()
-        .forEach(
-            (key, rows) ->
-                tally.add(
-                    Tally.Group.FINDING,
-                    key.kind().word(),
-                    key.table().tableName(),
-                    key.detail(),
-                    rows));
+    tally.addFindings(extract.findings());
     Map<ContractTable, Accounting.Line> accounts = new HashMap<>();
     for (ContractTable table : ContractTable.values()) {
       accounts.put(table, Accounts.line(tally, table).plus(extract.accounting().of(table)));
@@ -108,16 +99,7 @@ public final class ExtractCheck {
     ArrayList<Quarantined> quarantine = new ArrayList<>();
     patients.forEachRemaining(p -> quarantine.addAll(p.quarantine()));
     Tally tally = new Tally();
-    patients
-        .findings()
-        .forEach(
-            (key, sum) ->
-                tally.add(
-                    Tally.Group.FINDING,
-                    key.kind().word(),
-                    key.table().tableName(),
-                    key.detail(),
-                    sum));
+    tally.addFindings(patients.findings());
     for (ContractTable table : ContractTable.values()) {
       Accounts.tally(tally, table, patients.accounting().of(table));
     }

@@ -32,12 +32,11 @@ import millrace.analytics.patient.RunContext;
 import millrace.analytics.patient.Tally;
 import millrace.analytics.rates.RateTables;
 import millrace.etl.check.Accounting;
+import millrace.etl.check.Quarantined;
 import millrace.etl.contract.ContractTable;
 import millrace.etl.spark.ExtractFile;
 import millrace.etl.spark.ExtractReader;
 import millrace.etl.spark.ReadExtract;
-import org.apache.spark.sql.Dataset;
-import org.apache.spark.sql.Row;
 import org.apache.spark.sql.SparkSession;
 
 /** A run from the files of an extract to a published mart. */
@@ -87,32 +86,21 @@ public final class MartRun {
             extract.context().value().units(),
             extract.files().stream().map(ExtractFile::path).toList());
     step("patients");
-    try (PatientTables patients = PatientTables.of(spark, extract, context)) {
+    Path run = publisher.unfinished();
+    try (PatientSums patients = PatientSums.of(spark, extract, context, run)) {
       Tally tally = patients.tallies();
-      extract
-          .findings()
-          .forEach(
-              (key, rows) ->
-                  tally.add(
-                      Tally.Group.FINDING,
-                      key.kind().word(),
-                      key.table().tableName(),
-                      key.detail(),
-                      rows));
+      tally.addFindings(extract.findings());
       Map<ContractTable, Accounting.Line> accounts = accounts(extract, tally);
       AccountCheck.check(extract.files(), accounts);
-      TableWriter writer = new TableWriter(spark, publisher.unfinished());
       step("rates");
-      writeRates(patients, context, tally, writer);
+      writeRates(patients, context, run);
       step("tables");
-      writeTables(patients, extract, context, writer);
+      writeSummaries(extract, context, tally, run);
       return publisher.manifest(plan, extract, accounts);
     }
   }
 
-  private void writeRates(
-      PatientTables patients, RunContext context, Tally tally, TableWriter writer)
-      throws IOException {
+  private void writeRates(PatientSums patients, RunContext context, Path run) throws IOException {
     Map<String, String> kinds = new HashMap<>();
     context.units().forEach((id, unit) -> kinds.put(id, unit.kind().word()));
     RateTables rates =
@@ -120,49 +108,33 @@ public final class MartRun {
             new RateTables.Units(context.unitNames(), kinds),
             plan.subjects(),
             plan.policy().exposure());
-    try (RiskCube cube = RiskCube.of(patients.cells())) {
-      cube.addTo(rates);
-      writer.write(MartTable.RISK_CUBE, cube.table(spark, context));
-    }
-    writer.write(UNIT_RATES, UnitRateRow.class, rates.unitRates());
-    writer.write(DRUG_RATES, DrugRateRow.class, rates.drugRates());
-    writer.write(CLASS_PRESSURE, ClassPressureRow.class, rates.classPressure());
-    writer.write(UNIT_PRESSURE, UnitPressureRow.class, rates.unitPressure());
-    writer.write(FLOW, FlowRow.class, SummaryTables.flow(tally));
-    writer.write(FINDINGS, FindingRow.class, SummaryTables.findings(tally));
-    writer.write(MONITORING, MonitoringRow.class, SummaryTables.monitoring(tally, plan.subjects()));
-    writer.write(TESTING, TestingRow.class, SummaryTables.testing(tally));
-    writer.write(UNITS, UnitRow.class, SummaryTables.units(context.units()));
+    RiskCube.write(patients.cells(), context, run, rates);
+    write(run, UNIT_RATES, UnitRateRow.class, rates.unitRates());
+    write(run, DRUG_RATES, DrugRateRow.class, rates.drugRates());
+    write(run, CLASS_PRESSURE, ClassPressureRow.class, rates.classPressure());
+    write(run, UNIT_PRESSURE, UnitPressureRow.class, rates.unitPressure());
   }
 
-  private void writeTables(
-      PatientTables patients, ReadExtract extract, RunContext context, TableWriter writer)
+  private void writeSummaries(ReadExtract extract, RunContext context, Tally tally, Path run)
       throws IOException {
-    writer.write(MartTable.EPISODES, patients.episodes());
-    writer.write(
-        MartTable.GRADUAL_RISES,
-        patients.sorted(MartTable.GRADUAL_RISES, "patient_id", "first_at"));
-    writer.write(
-        MartTable.LINKS, patients.sorted(MartTable.LINKS, "patient_id", "onset_at", "agent"));
-    List<QuarantineRow> small =
-        extract.quarantine().stream()
-            .map(q -> PatientAnalyst.quarantineRow(q, context.files()))
-            .toList();
-    RowCodec<QuarantineRow> codec = new RowCodec<>(QuarantineRow.class);
-    Dataset<Row> ofTablesWithoutPatient =
-        spark.createDataFrame(codec.encodeAll(small), codec.schema()).coalesce(1);
-    writer.write(
-        MartTable.QUARANTINE, patients.table(MartTable.QUARANTINE).union(ofTablesWithoutPatient));
-    for (MartTable table :
-        List.of(
-            MartTable.ADMISSIONS,
-            MartTable.RESULTS,
-            MartTable.DOSES,
-            MartTable.PRESSURES,
-            MartTable.STAYS,
-            MartTable.REPLACEMENTS)) {
-      writer.write(table, patients.table(table));
+    write(run, FLOW, FlowRow.class, SummaryTables.flow(tally));
+    write(run, FINDINGS, FindingRow.class, SummaryTables.findings(tally));
+    write(run, MONITORING, MonitoringRow.class, SummaryTables.monitoring(tally, plan.subjects()));
+    write(run, TESTING, TestingRow.class, SummaryTables.testing(tally));
+    write(run, UNITS, UnitRow.class, SummaryTables.units(context.units()));
+    // The other parts of the quarantine are those of the patients.
+    int part = extract.patientBlocks().toJavaRDD().getNumPartitions();
+    Path folder = run.resolve(MartTable.QUARANTINE.tableName());
+    try (TableFile<QuarantineRow> file = new TableFile<>(QuarantineRow.class, folder, part)) {
+      for (Quarantined row : extract.quarantine()) {
+        file.write(PatientAnalyst.quarantineRow(row, context.files()));
+      }
     }
+  }
+
+  private static <T extends Record> void write(
+      Path run, MartTable table, Class<T> rowType, List<T> rows) throws IOException {
+    TableFile.write(rowType, run.resolve(table.tableName()), rows);
   }
 
   private static Map<ContractTable, Accounting.Line> accounts(ReadExtract extract, Tally tally) {

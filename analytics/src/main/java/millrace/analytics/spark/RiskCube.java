@@ -2,125 +2,108 @@ package millrace.analytics.spark;
 
 import static org.apache.spark.sql.functions.col;
 
-import java.io.Serializable;
+import java.io.IOException;
+import java.nio.file.Path;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.Iterator;
 import java.util.List;
 import millrace.analytics.exposure.Exposure;
 import millrace.analytics.exposure.Subjects;
+import millrace.analytics.mart.MartTable;
 import millrace.analytics.mart.RiskCubeRow;
 import millrace.analytics.patient.RunContext;
 import millrace.analytics.rates.RateTables;
 import millrace.analytics.rates.RiskSum;
 import millrace.analytics.risk.CellTable;
 import millrace.analytics.risk.RiskCell;
-import org.apache.spark.api.java.JavaRDD;
+import org.apache.spark.api.java.function.Function2;
 import org.apache.spark.sql.Dataset;
 import org.apache.spark.sql.Row;
 import org.apache.spark.sql.RowFactory;
-import org.apache.spark.sql.SparkSession;
-import org.apache.spark.storage.StorageLevel;
 
 /**
- * Time at risk by cell: the published cube by day, and the sums by month that the rates are made
- * of.
+ * Time at risk by cell: writes the published cube by day and adds up the months that the rates are
+ * made of.
  */
-final class RiskCube implements AutoCloseable {
+final class RiskCube {
   private static final int FILES = 4;
 
-  private final Dataset<Row> cells;
+  private RiskCube() {}
 
-  private RiskCube(Dataset<Row> cells) {
-    this.cells = cells;
-  }
-
-  static RiskCube of(Dataset<Row> cells) {
-    return new RiskCube(cells.persist(StorageLevel.MEMORY_AND_DISK()));
-  }
-
-  /** Adds all cells to the rates, each day's as its month's. */
-  void addTo(RateTables rates) {
-    List<Row> monthly = cells.toJavaRDD().mapPartitions(RiskCube::byMonth).collect();
+  /** Writes the cube and adds every cell to the rates, each day's as its month's. */
+  static void write(Dataset<Row> cells, RunContext context, Path run, RateTables rates) {
+    List<Row> monthly =
+        cells
+            .repartition(FILES, col("cell"))
+            .sortWithinPartitions("cell")
+            .toJavaRDD()
+            .mapPartitionsWithIndex(new Writer(context, run), true)
+            .collect();
     for (Row row : monthly) {
       rates.add(
           RiskCell.of(row.getLong(0)), new RiskSum(row.getLong(1), row.getLong(2), row.getLong(3)));
     }
   }
 
-  /** The published cube. */
-  Dataset<Row> table(SparkSession spark, RunContext context) {
-    JavaRDD<Row> rows =
-        cells
-            .repartition(FILES, col("cell"))
-            .sortWithinPartitions("cell")
-            .toJavaRDD()
-            .map(new Decoder(context.unitNames(), context.subjects())::decode);
-    return spark.createDataFrame(rows, new RowCodec<>(RiskCubeRow.class).schema());
-  }
-
-  @Override
-  public void close() {
-    cells.unpersist();
-  }
-
-  private static Iterator<Row> byMonth(Iterator<Row> daily) {
-    CellTable months = new CellTable();
-    List<long[]> withEpisodes = new ArrayList<>();
-    daily.forEachRemaining(
-        row -> {
-          RiskCell cell = RiskCell.of(row.getLong(0));
-          long firstDay = LocalDate.ofEpochDay(cell.epochDay()).withDayOfMonth(1).toEpochDay();
-          long month =
-              new RiskCell(
-                      firstDay,
-                      cell.unit(),
-                      cell.attribution(),
-                      cell.subject(),
-                      cell.recentHypotension(),
-                      cell.burden())
-                  .packed();
-          months.addSeconds(month, row.getLong(1));
-          if (row.getLong(2) > 0) {
-            withEpisodes.add(new long[] {month, row.getLong(2), row.getLong(3)});
-          }
-        });
-    List<Row> rows = new ArrayList<>();
-    months.forEach(
-        (cell, seconds, episodes, stage2plus) ->
-            rows.add(RowFactory.create(cell, seconds, 0L, 0L)));
-    withEpisodes.forEach(e -> rows.add(RowFactory.create(e[0], 0L, e[1], e[2])));
-    return rows.iterator();
-  }
-
-  /** Cells in words. */
-  private static final class Decoder implements Serializable {
+  /** Writes a part of the cube and gives its sums by month. */
+  private static final class Writer implements Function2<Integer, Iterator<Row>, Iterator<Row>> {
     private static final long serialVersionUID = 1L;
     private final ArrayList<String> units;
     private final ArrayList<Subjects.Subject> subjects;
-    private final RowCodec<RiskCubeRow> codec = new RowCodec<>(RiskCubeRow.class);
+    private final String folder;
 
-    Decoder(List<String> units, Subjects subjects) {
-      this.units = new ArrayList<>(units);
-      this.subjects = new ArrayList<>(subjects.all());
+    Writer(RunContext context, Path run) {
+      this.units = new ArrayList<>(context.unitNames());
+      this.subjects = new ArrayList<>(context.subjects().all());
+      this.folder = run.resolve(MartTable.RISK_CUBE.tableName()).toString();
     }
 
-    Row decode(Row row) {
-      RiskCell cell = RiskCell.of(row.getLong(0));
-      boolean all = cell.subject() == RiskCell.ALL;
-      return codec.encode(
-          new RiskCubeRow(
-              LocalDate.ofEpochDay(cell.epochDay()).toString(),
-              units.get(cell.unit()),
-              cell.attribution().word(),
-              all ? "all" : subjects.get(cell.subject()).level().word(),
-              all ? "" : subjects.get(cell.subject()).name(),
-              !all,
+    @Override
+    public Iterator<Row> call(Integer part, Iterator<Row> cells) throws IOException {
+      CellTable months = new CellTable();
+      try (TableFile<RiskCubeRow> file =
+          new TableFile<>(RiskCubeRow.class, Path.of(folder), part)) {
+        while (cells.hasNext()) {
+          Row row = cells.next();
+          RiskCell cell = RiskCell.of(row.getLong(0));
+          file.write(inWords(cell, row));
+          months.add(month(cell), row.getLong(1), (int) row.getLong(2), (int) row.getLong(3));
+        }
+      }
+      List<Row> sums = new ArrayList<>();
+      months.forEach(
+          (cell, seconds, episodes, stage2plus) ->
+              sums.add(RowFactory.create(cell, seconds, (long) episodes, (long) stage2plus)));
+      return sums.iterator();
+    }
+
+    private static long month(RiskCell cell) {
+      long firstDay = LocalDate.ofEpochDay(cell.epochDay()).withDayOfMonth(1).toEpochDay();
+      return new RiskCell(
+              firstDay,
+              cell.unit(),
+              cell.attribution(),
+              cell.subject(),
               cell.recentHypotension(),
-              Exposure.burdenWord(cell.burden()),
-              row.getLong(1),
-              row.getLong(2),
-              row.getLong(3)));
+              cell.burden())
+          .packed();
+    }
+
+    private RiskCubeRow inWords(RiskCell cell, Row row) {
+      boolean all = cell.subject() == RiskCell.ALL;
+      return new RiskCubeRow(
+          LocalDate.ofEpochDay(cell.epochDay()).toString(),
+          units.get(cell.unit()),
+          cell.attribution().word(),
+          all ? "all" : subjects.get(cell.subject()).level().word(),
+          all ? "" : subjects.get(cell.subject()).name(),
+          !all,
+          cell.recentHypotension(),
+          Exposure.burdenWord(cell.burden()),
+          row.getLong(1),
+          row.getLong(2),
+          row.getLong(3));
     }
   }
 }

@@ -28,11 +28,7 @@ public final class RunSession {
     conf.set("spark.ui.enabled", "false");
     conf.set("spark.sql.session.timeZone", "UTC");
     conf.set("spark.sql.datetime.java8API.enabled", "true");
-    conf.set("spark.sql.parquet.outputTimestampType", "TIMESTAMP_MICROS");
     conf.set("spark.sql.shuffle.partitions", "4");
-    // A patient's row holds thousands of lines: a batch of the default 10,000 of them would not
-    // fit.
-    conf.set("spark.sql.inMemoryColumnarStorage.batchSize", "200");
     conf.set("spark.sql.adaptive.enabled", "false");
     conf.set("spark.serializer", "org.apache.spark.serializer.JavaSerializer");
     return SparkSession.builder().config(conf).getOrCreate();
