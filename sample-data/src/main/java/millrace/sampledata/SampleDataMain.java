@@ -14,11 +14,10 @@ import picocli.CommandLine.Option;
  */
 @Command(
     name = "sample-data",
-    mixinStandardHelpOptions = true,
     sortOptions = false,
     usageHelpAutoWidth = true,
     description =
-        "Makes an invented hospital's extract (OUT/extract) and what was planted in it (OUT/truth).")
+        "Makes an invented hospital's extract (DIR/extract) and what was planted in it (DIR/truth).")
 public final class SampleDataMain implements Callable<Integer> {
   private static final int DONE = 0;
   private static final int FAILED = 1;
@@ -57,6 +56,12 @@ public final class SampleDataMain implements Callable<Integer> {
       description =
           "Compress all files but one; else some below 100000 admissions, none from there on.")
   private boolean gz;
+
+  @Option(
+      names = {"-h", "--help"},
+      usageHelp = true,
+      description = "Print this help.")
+  private boolean help;
 
   /**
    * Starts the program.
