@@ -60,6 +60,7 @@ final class EpisodeRows {
     PatientTimeline timeline = setting.timeline();
     PressureMeasures measures =
         PressureMeasures.before(onset, setting.pressure(), context.policy().pressure());
+    Occupancy occupancy = timeline.occupancy().seenBy(span.admission());
     boolean inAdmission = span.admission() != Membership.NONE;
     long dayBefore = onset - context.policy().cohort().dayBeforeSeconds();
     return new EpisodeRow(
@@ -91,8 +92,8 @@ final class EpisodeRows {
         episode.transientCourse() ? "transient" : "persistent",
         episode.prolonged(),
         episode.outcome().map(Outcome::word),
-        unit(timeline.occupancy(), onset),
-        unit(timeline.occupancy(), dayBefore),
+        unit(occupancy, onset),
+        unit(occupancy, dayBefore),
         links.exposing(setting.exposure(), Subjects.Level.AGENT, onset),
         links.exposing(setting.exposure(), Subjects.Level.CLASS, onset),
         Exposure.burdenWord(setting.exposure().burdenAt(onset)),

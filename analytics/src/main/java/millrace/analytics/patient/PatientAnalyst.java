@@ -119,13 +119,14 @@ public final class PatientAnalyst {
     PressureSeries pressure = pressures.read(timeline);
     List<AdmissionRow> admissionRows = new ArrayList<>();
     Set<Integer> counted = new HashSet<>();
-    RiskCells.Strata strata =
-        new RiskCells.Strata(timeline.occupancy(), exposure, pressure.recent());
     for (int i = 0; i < admissions; i++) {
       OptionalLong atRiskSeconds = OptionalLong.empty();
       if (classes.get(i) == CohortClass.ELIGIBLE) {
         RiskTime risk = risks.of(timeline, i, episodes);
-        riskCells.add(risk, strata, episodes);
+        riskCells.add(
+            risk,
+            new RiskCells.Strata(timeline.occupancy().seenBy(i), exposure, pressure.recent()),
+            episodes);
         risk.countedEpisode().ifPresent(counted::add);
         atRiskSeconds = OptionalLong.of(risk.seconds());
       }
@@ -202,7 +203,7 @@ public final class PatientAnalyst {
         rise.referenceNanomolesPerLitre(),
         rise.nanomolesPerLitre(),
         classes.get(rise.admission()).word(),
-        EpisodeRows.unit(timeline.occupancy(), rise.at()));
+        EpisodeRows.unit(timeline.occupancy().seenBy(rise.admission()), rise.at()));
   }
 
   private QuarantineRow quarantined(Quarantined row) {

@@ -28,7 +28,8 @@ public final class CellTable {
 
   /** Adds time. */
   public void addSeconds(long packed, long more) {
-    seconds[slot(packed)] += more;
+    int slot = slot(packed);
+    seconds[slot] += more;
   }
 
   /** Adds sums. */

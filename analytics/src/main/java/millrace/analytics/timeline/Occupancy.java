@@ -22,32 +22,34 @@ public final class Occupancy {
   /** No unit at all. */
   public static final String NOWHERE = "";
 
+  private final Membership membership;
+  private final List<Stay> stays;
   private final long[] changes;
   private final String[] units;
 
-  private Occupancy(long[] changes, String[] units) {
-    this.changes = changes;
-    this.units = units;
+  private Occupancy(Membership membership, List<Stay> stays, int own) {
+    this.membership = membership;
+    this.stays = stays;
+    this.changes = changes(membership, stays);
+    this.units = new String[changes.length];
+    for (int i = 0; i < changes.length; i++) {
+      boolean inOwn =
+          own != Membership.NONE && membership.stretches().get(own).contains(changes[i]);
+      units[i] = unit(changes[i], inOwn ? own : membership.holder(changes[i]), stays);
+    }
   }
 
   /** The occupancy of one patient's stays. */
   public static Occupancy of(Membership membership, List<UnitStay> stays) {
-    List<Stay> all = stays(membership, stays);
-    TreeSet<Long> cuts = new TreeSet<>();
-    for (Stretch stretch : membership.stretches()) {
-      cuts.add(stretch.from());
-      cuts.add(stretch.to());
-    }
-    for (Stay stay : all) {
-      cuts.add(stay.from());
-      cuts.add(stay.to());
-    }
-    long[] changes = cuts.stream().mapToLong(Long::longValue).toArray();
-    String[] units = new String[changes.length];
-    for (int i = 0; i < changes.length; i++) {
-      units[i] = unit(changes[i], membership.holder(changes[i]), all);
-    }
-    return new Occupancy(changes, units);
+    return new Occupancy(membership, stays(membership, stays), Membership.NONE);
+  }
+
+  /**
+   * The same as one of the patient's admissions sees it: where admissions overlap, its own stays
+   * come first.
+   */
+  public Occupancy seenBy(int admission) {
+    return membership.overlapping() ? new Occupancy(membership, stays, admission) : this;
   }
 
   /** The unit at an instant. */
@@ -60,6 +62,19 @@ public final class Occupancy {
   /** Instants at which the unit may change, in order. */
   public long[] changes() {
     return changes;
+  }
+
+  private static long[] changes(Membership membership, List<Stay> stays) {
+    TreeSet<Long> cuts = new TreeSet<>();
+    for (Stretch stretch : membership.stretches()) {
+      cuts.add(stretch.from());
+      cuts.add(stretch.to());
+    }
+    for (Stay stay : stays) {
+      cuts.add(stay.from());
+      cuts.add(stay.to());
+    }
+    return cuts.stream().mapToLong(Long::longValue).toArray();
   }
 
   private static List<Stay> stays(Membership membership, List<UnitStay> stays) {

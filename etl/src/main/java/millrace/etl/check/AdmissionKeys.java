@@ -18,12 +18,12 @@ import millrace.etl.record.SourceLine;
  */
 public final class AdmissionKeys {
   /**
-   * A row of admissions that broke no rule before repeated-key.
+   * A row of admissions with a key.
    *
    * @param admissionId its key
-   * @param patientId its patient
+   * @param patientId its patient; may be empty when the row is not valid
    * @param source where it stands
-   * @param valid whether it breaks no later rule either
+   * @param valid whether it breaks no rule but perhaps repeated-key
    */
   public record Claim(String admissionId, String patientId, SourceLine source, boolean valid) {}
 
@@ -31,13 +31,14 @@ public final class AdmissionKeys {
    * The claims of one id, settled.
    *
    * @param kept patient of the row that is kept; empty for none
-   * @param repeated rows that repeat the key of the kept one
+   * @param repeated rows that repeat the key of an earlier one
    */
   public record Settled(Optional<String> kept, List<SourceLine> repeated) {}
 
   private final CheckContext context;
   private final PatientRows patientRows = new PatientRows();
   private final TableSieve<Patient> patients;
+  private final ClaimRows claimRows;
   private final TableSieve<Claim> claims;
 
   /** Claims against that extract; its repeated admissions are not known yet. */
@@ -49,14 +50,10 @@ public final class AdmissionKeys {
     patients =
         new TableSieve<>(
             ContractTable.PATIENTS, patientRows, context.layouts(), clock, ignored, unused);
+    claimRows = new ClaimRows(context, ignored);
     claims =
         new TableSieve<>(
-            ContractTable.ADMISSIONS,
-            new ClaimRows(context, ignored),
-            context.layouts(),
-            clock,
-            ignored,
-            unused);
+            ContractTable.ADMISSIONS, claimRows, context.layouts(), clock, ignored, unused);
   }
 
   /** The claims of one patient's rows of {@code patients} and {@code admissions}. */
@@ -65,50 +62,64 @@ public final class AdmissionKeys {
     patientRows.startGroup();
     List<Patient> found =
         patients.sift(rows.getOrDefault(ContractTable.PATIENTS, List.of()), Person.UNKNOWN, aside);
-    if (found.isEmpty()) {
-      return List.of();
-    }
-    Person person = Person.of(found.get(0), context.cover().zone());
-    return claims.sift(rows.getOrDefault(ContractTable.ADMISSIONS, List.of()), person, aside);
+    Person person =
+        found.isEmpty() ? Person.UNKNOWN : Person.of(found.get(0), context.cover().zone());
+    List<Claim> all = new ArrayList<>();
+    claimRows.brokenInto(all);
+    all.addAll(claims.sift(rows.getOrDefault(ContractTable.ADMISSIONS, List.of()), person, aside));
+    return all;
   }
 
-  /** Settles all claims of one id: the first valid row is kept, later ones repeat its key. */
+  /**
+   * Settles all claims of one id: later rows repeat the key of the first, which is kept if it is
+   * valid.
+   */
   public static Settled settle(List<Claim> ofOneId) {
     List<Claim> ordered = new ArrayList<>(ofOneId);
     ordered.sort(Comparator.comparing(Claim::source));
-    Optional<String> kept = Optional.empty();
-    List<SourceLine> repeated = new ArrayList<>();
-    for (Claim claim : ordered) {
-      if (kept.isPresent()) {
-        repeated.add(claim.source());
-      } else if (claim.valid()) {
-        kept = Optional.of(claim.patientId());
-      }
+    if (ordered.isEmpty()) {
+      return new Settled(Optional.empty(), List.of());
     }
+    Claim first = ordered.get(0);
+    Optional<String> kept = first.valid() ? Optional.of(first.patientId()) : Optional.empty();
+    List<SourceLine> repeated = ordered.stream().skip(1).map(Claim::source).toList();
     return new Settled(kept, repeated);
   }
 
-  /** Rows of admissions as claims. */
+  /** Rows of admissions as claims, broken ones too. */
   private static final class ClaimRows implements RowKind<Claim> {
-    private static final int PATIENT_ID = ContractTable.ADMISSIONS.column("patient_id");
     private final AdmissionRows rows;
+    private List<Claim> broken = new ArrayList<>();
 
     ClaimRows(CheckContext context, Findings findings) {
       rows = new AdmissionRows(context, findings);
     }
 
+    void brokenInto(List<Claim> target) {
+      broken = target;
+    }
+
     @Override
     public Broken broken(ParsedRow row, Person person) {
-      return null;
+      return rows.broken(row, person);
     }
 
     @Override
     public Claim keep(ParsedRow row, Person person) {
-      return new Claim(
-          AdmissionRows.id(row),
-          row.text(PATIENT_ID),
-          row.source,
-          rows.brokenAfterKey(row, person) == null);
+      return claim(row, true);
     }
+
+    @Override
+    public void sawBroken(ParsedRow row) {
+      if (!AdmissionRows.id(row).isEmpty()) {
+        broken.add(claim(row, false));
+      }
+    }
+
+    private static Claim claim(ParsedRow row, boolean valid) {
+      return new Claim(AdmissionRows.id(row), row.text(PATIENT_ID), row.source, valid);
+    }
+
+    private static final int PATIENT_ID = ContractTable.ADMISSIONS.column("patient_id");
   }
 }

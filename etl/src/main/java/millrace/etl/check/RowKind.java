@@ -11,4 +11,10 @@ interface RowKind<T> {
 
   /** The canonical row, or null when the row is kept but no computation uses it. */
   T keep(ParsedRow row, Person person);
+
+  /**
+   * Told of each row that broke a rule; its fields are split, but not all of them may have been
+   * read.
+   */
+  default void sawBroken(ParsedRow row) {}
 }

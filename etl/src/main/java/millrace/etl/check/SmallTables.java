@@ -33,7 +33,7 @@ public final class SmallTables {
     this.accounting = accounting;
   }
 
-  /** Kept units by id; the first kept row of an id stands. */
+  /** Kept units by id; later rows with an id already seen are broken. */
   public Map<String, Unit> units(List<RawRow> rows, List<Quarantined> quarantine) {
     Map<String, Unit> units = new HashMap<>();
     for (Unit unit : sift(ContractTable.UNITS, new UnitRows(), rows, quarantine)) {
@@ -74,18 +74,23 @@ public final class SmallTables {
     private static final int UNIT_ID = ContractTable.UNITS.column("unit_id");
     private static final int NAME = ContractTable.UNITS.column("name");
     private static final int KIND = ContractTable.UNITS.column("kind");
-    private final Set<String> kept = new HashSet<>();
+    private final Set<String> seen = new HashSet<>();
 
     @Override
     public Broken broken(ParsedRow row, Person person) {
-      return kept.contains(row.text(UNIT_ID)) ? new Broken(Rule.REPEATED_KEY, "unit_id") : null;
+      return seen.contains(row.text(UNIT_ID)) ? new Broken(Rule.REPEATED_KEY, "unit_id") : null;
     }
 
     @Override
     public Unit keep(ParsedRow row, Person person) {
-      kept.add(row.text(UNIT_ID));
+      seen.add(row.text(UNIT_ID));
       return new Unit(
           row.text(UNIT_ID), row.text(NAME), row.word(KIND, UnitKind.values(), UnitKind.OTHER));
+    }
+
+    @Override
+    public void sawBroken(ParsedRow row) {
+      seen.add(row.text(UNIT_ID));
     }
   }
 

@@ -63,6 +63,7 @@ final class TableSieve<T> {
       }
       if (rule != null) {
         broken++;
+        kind.sawBroken(parser.row());
         quarantine.add(new Quarantined(table, raw.source(), rule, raw.text()));
         continue;
       }
