@@ -20,6 +20,7 @@ import millrace.etl.check.Accounting;
 import millrace.etl.check.CheckContext;
 import millrace.etl.check.Quarantined;
 import millrace.etl.contract.ContractTable;
+import millrace.etl.spark.CutSizes;
 import millrace.etl.spark.ExtractFile;
 import millrace.etl.spark.ExtractReader;
 import millrace.etl.spark.PatientStream;
@@ -55,7 +56,7 @@ public final class ExtractCheck {
       throws IOException {
     TaskListener steps = new TaskListener(progress);
     spark.sparkContext().addSparkListener(steps);
-    ReadExtract extract = new ExtractReader(spark, folder, steps::step).open();
+    ReadExtract extract = new ExtractReader(spark, folder, CutSizes.DEFAULT, steps::step).open();
     steps.step("patients");
     Broadcast<CheckContext> context = extract.context();
     JavaRDD<Part> parts =

@@ -34,6 +34,7 @@ import millrace.analytics.rates.RateTables;
 import millrace.etl.check.Accounting;
 import millrace.etl.check.Quarantined;
 import millrace.etl.contract.ContractTable;
+import millrace.etl.spark.CutSizes;
 import millrace.etl.spark.ExtractFile;
 import millrace.etl.spark.ExtractReader;
 import millrace.etl.spark.ReadExtract;
@@ -43,13 +44,20 @@ import org.apache.spark.sql.SparkSession;
 public final class MartRun {
   private final SparkSession spark;
   private final RunPlan plan;
+  private final CutSizes cuts;
   private final TaskListener steps;
   private final StageClock clock = new StageClock();
 
   /** A run of that plan. */
   public MartRun(SparkSession spark, RunPlan plan, Progress progress) {
+    this(spark, plan, progress, CutSizes.DEFAULT);
+  }
+
+  /** A run of that plan that cuts the extract into those sizes. */
+  MartRun(SparkSession spark, RunPlan plan, Progress progress, CutSizes cuts) {
     this.spark = spark;
     this.plan = plan;
+    this.cuts = cuts;
     this.steps = new TaskListener(progress);
     spark.sparkContext().addSparkListener(steps);
   }
@@ -77,7 +85,7 @@ public final class MartRun {
   }
 
   private RunManifest compute(MartPublisher publisher) throws IOException {
-    ReadExtract extract = new ExtractReader(spark, plan.extract(), this::step).open();
+    ReadExtract extract = new ExtractReader(spark, plan.extract(), cuts, this::step).open();
     RunContext context =
         new RunContext(
             plan.policy(),

@@ -48,24 +48,25 @@ public final class ExtractReader {
 
   private static final Set<ContractTable> PEOPLE =
       EnumSet.of(ContractTable.PATIENTS, ContractTable.ADMISSIONS);
-  private static final long SPLIT_BYTES = 32L << 20;
-  private static final long BUCKET_BYTES = 40L << 20;
   private static final int MOST_BUCKETS = 2_000;
 
   private final SparkSession spark;
   private final JavaSparkContext context;
   private final Path folder;
+  private final CutSizes cuts;
   private final Consumer<String> step;
 
   /**
    * A reader of that folder.
    *
+   * @param cuts into what sizes it is cut
    * @param step told the name of each step as it starts
    */
-  public ExtractReader(SparkSession spark, Path folder, Consumer<String> step) {
+  public ExtractReader(SparkSession spark, Path folder, CutSizes cuts, Consumer<String> step) {
     this.spark = spark;
     this.context = JavaSparkContext.fromSparkContext(spark.sparkContext());
     this.folder = folder;
+    this.cuts = cuts;
     this.step = step;
   }
 
@@ -124,6 +125,7 @@ public final class ExtractReader {
       resource.paths().forEach(path -> unread.add(new ExtractFile(resource.table(), path, null)));
     }
     String root = folder.toString();
+    long splitBytes = cuts.splitBytes();
     return context
         .parallelize(unread, unread.size())
         .map(
@@ -131,7 +133,7 @@ public final class ExtractReader {
                 new ExtractFile(
                     f.table(),
                     f.path(),
-                    FileSurveyor.survey(Path.of(root), f.path(), f.table(), SPLIT_BYTES)))
+                    FileSurveyor.survey(Path.of(root), f.path(), f.table(), splitBytes)))
         .collect();
   }
 
@@ -169,9 +171,9 @@ public final class ExtractReader {
    * How many parts the patients are cut into: a matter of the extract alone, so that the mart's
    * files are the same everywhere.
    */
-  private static int buckets(List<ExtractFile> files) {
+  private int buckets(List<ExtractFile> files) {
     long bytes = files.stream().mapToLong(f -> f.survey().textBytes()).sum();
-    return (int) Math.min(MOST_BUCKETS, 1 + bytes / BUCKET_BYTES);
+    return (int) Math.min(MOST_BUCKETS, 1 + bytes / cuts.bucketBytes());
   }
 
   private static void refuseEmpty(List<ExtractFile> files, Findings findings) {
