@@ -1,12 +1,11 @@
 package millrace.analytics.patient;
 
 import java.util.List;
-import java.util.OptionalInt;
-import java.util.stream.IntStream;
 import millrace.analytics.mart.AdmissionRow;
 import millrace.analytics.timeline.Membership;
 import millrace.analytics.timeline.PatientTimeline;
 import millrace.analytics.timeline.ResultState;
+import millrace.analytics.timeline.Stretch;
 import millrace.etl.check.CheckedPatient;
 import millrace.etl.check.FindingKind;
 import millrace.etl.contract.ContractTable;
@@ -58,14 +57,14 @@ final class FindingTally {
     boolean agrees =
         number != Membership.NONE
             && membership.stretches().get(number).admission().admissionId().equals(admissionId);
-    OptionalInt own =
-        IntStream.range(0, membership.stretches().size())
-            .filter(
-                i -> membership.stretches().get(i).admission().admissionId().equals(admissionId))
-            .findFirst();
+    if (agrees) {
+      return;
+    }
     // Another patient's admission was counted when the row was checked.
-    if (!agrees && own.isPresent()) {
-      add(FindingKind.OTHER_ADMISSION, table, "by time");
+    for (Stretch own : membership.stretches()) {
+      if (own.admission().admissionId().equals(admissionId)) {
+        add(FindingKind.OTHER_ADMISSION, table, "by time");
+      }
     }
   }
 

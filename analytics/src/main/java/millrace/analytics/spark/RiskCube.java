@@ -1,7 +1,5 @@
 package millrace.analytics.spark;
 
-import static org.apache.spark.sql.functions.col;
-
 import java.io.IOException;
 import java.nio.file.Path;
 import java.time.LocalDate;
@@ -27,15 +25,12 @@ import org.apache.spark.sql.RowFactory;
  * made of.
  */
 final class RiskCube {
-  private static final int FILES = 4;
-
   private RiskCube() {}
 
   /** Writes the cube and adds every cell to the rates, each day's as its month's. */
   static void write(Dataset<Row> cells, RunContext context, Path run, RateTables rates) {
     List<Row> monthly =
         cells
-            .repartition(FILES, col("cell"))
             .sortWithinPartitions("cell")
             .toJavaRDD()
             .mapPartitionsWithIndex(new Writer(context, run), true)

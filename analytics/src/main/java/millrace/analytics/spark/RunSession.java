@@ -30,6 +30,11 @@ public final class RunSession {
     conf.set("spark.sql.datetime.java8API.enabled", "true");
     conf.set("spark.sql.shuffle.partitions", "4");
     conf.set("spark.sql.adaptive.enabled", "false");
+    // A file for each part of the patients from each part of a table would be tens of thousands of
+    // files.
+    conf.set("spark.shuffle.sort.bypassMergeThreshold", "1");
+    conf.set("spark.sql.shuffle.orderIndependentChecksum.enabled", "false");
+    conf.set("spark.sql.inMemoryColumnarStorage.compressed", "false");
     conf.set("spark.serializer", "org.apache.spark.serializer.JavaSerializer");
     return SparkSession.builder().config(conf).getOrCreate();
   }

@@ -92,43 +92,47 @@ public final class RecordReader implements Closeable {
   private boolean readRecord() throws IOException {
     int start = next;
     int at = start;
-    boolean fieldStart = true;
-    boolean quoted = false;
     long lines = 1;
+    boolean quoted = false;
     while (true) {
-      if (at == limit) {
+      at = toQuoteOrLineEnd(at);
+      if (at + 1 >= limit && !endOfStream) {
+        // A closing quote is told from a doubled one by the byte after it.
         int moved = fill(start);
         start -= moved;
         at -= moved;
-        if (at == limit) {
-          if (quoted) {
-            throw new UnclosedQuoteException(nextLine);
-          }
-          return finish(start, at, at, lines);
-        }
+        continue;
       }
-      byte b = buffer[at++];
-      if (quoted) {
-        if (b == '\n') {
-          lines++;
-        } else if (b == '"') {
-          // A doubled quote closes and opens again at once: the state after it is the same.
-          quoted = false;
-          fieldStart = true;
+      if (at == limit) {
+        if (quoted) {
+          throw new UnclosedQuoteException(nextLine);
         }
-      } else if (b == '\n') {
+        return finish(start, at, at, lines);
+      }
+      byte found = buffer[at++];
+      if (found == '\n' && !quoted) {
         int end = at - 1;
-        if (end > start && buffer[end - 1] == '\r') {
-          end--;
-        }
-        return finish(start, end, at, lines);
-      } else if (b == ',') {
-        fieldStart = true;
+        return finish(start, end > start && buffer[end - 1] == '\r' ? end - 1 : end, at, lines);
+      }
+      if (found == '\n') {
+        lines++;
+      } else if (quoted && at < limit && buffer[at] == '"') {
+        at++;
       } else {
-        quoted = b == '"' && fieldStart;
-        fieldStart = false;
+        quoted = !quoted && (at - 1 == start || buffer[at - 2] == ',');
       }
     }
+  }
+
+  /** Position of the next quote or line end, or the limit. */
+  private int toQuoteOrLineEnd(int from) {
+    byte[] bytes = buffer;
+    int end = limit;
+    int at = from;
+    while (at < end && bytes[at] != '\n' && bytes[at] != '"') {
+      at++;
+    }
+    return at;
   }
 
   private boolean finish(int start, int end, int after, long lines) {

@@ -57,6 +57,46 @@ public final class RowFields {
     fieldsInRow = field;
   }
 
+  /**
+   * Whether a field of a record can be read where it stands: no field up to it starts with a quote.
+   * Then {@code range} holds its trimmed start and end.
+   *
+   * @param field position of the field in the record
+   */
+  public static boolean findPlain(byte[] bytes, int from, int to, int field, int[] range) {
+    int at = from;
+    for (int passed = 0; ; passed++) {
+      if (at < to && bytes[at] == '"') {
+        return false;
+      }
+      int start = at;
+      while (at < to && bytes[at] != ',') {
+        at++;
+      }
+      if (passed == field) {
+        range[0] = start;
+        range[1] = at;
+        trim(bytes, range);
+        return true;
+      }
+      if (at >= to) {
+        range[0] = to;
+        range[1] = to;
+        return true;
+      }
+      at++;
+    }
+  }
+
+  private static void trim(byte[] bytes, int[] range) {
+    while (range[0] < range[1] && isBlank(bytes[range[0]])) {
+      range[0]++;
+    }
+    while (range[1] > range[0] && isBlank(bytes[range[1] - 1])) {
+      range[1]--;
+    }
+  }
+
   /** Number of fields that the record had. */
   public int fieldsInRow() {
     return fieldsInRow;

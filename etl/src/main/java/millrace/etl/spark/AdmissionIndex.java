@@ -1,5 +1,7 @@
 package millrace.etl.spark;
 
+import static org.apache.spark.sql.functions.col;
+
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.HashSet;
@@ -36,9 +38,21 @@ final class AdmissionIndex {
           .add("line", DataTypes.IntegerType, false)
           .add("valid", DataTypes.BooleanType, false);
 
-  private final JavaRDD<Row> settled;
+  /**
+   * A stay's block with its patient, the place of a repeated row without a key, or the hash of a
+   * kept id.
+   */
+  private static final StructType SETTLED =
+      new StructType()
+          .add("patient_id", DataTypes.StringType, true)
+          .add("block", DataTypes.BinaryType, true)
+          .add("file", DataTypes.IntegerType, false)
+          .add("line", DataTypes.IntegerType, false)
+          .add("hash", DataTypes.LongType, false);
 
-  private AdmissionIndex(JavaRDD<Row> settled) {
+  private final Dataset<Row> settled;
+
+  private AdmissionIndex(Dataset<Row> settled) {
     this.settled = settled;
   }
 
@@ -68,29 +82,36 @@ final class AdmissionIndex {
     Dataset<Row> together = spark.createDataFrame(claims.union(stayRows), CLAIMS);
     JavaRDD<Row> settled =
         BlockFrames.byKey(together, partitions).toJavaRDD().mapPartitions(AdmissionIndex::settle);
-    return new AdmissionIndex(settled.persist(StorageLevel.MEMORY_AND_DISK_SER()));
+    return new AdmissionIndex(
+        spark.createDataFrame(settled, SETTLED).persist(StorageLevel.MEMORY_AND_DISK_SER()));
   }
 
   /** Rows of {@code admissions} that repeat a key. */
   Set<SourceLine> repeated() {
     return new HashSet<>(
         settled
-            .filter(r -> r.isNullAt(0))
-            .map(r -> new SourceLine(r.getInt(2), r.getInt(3)))
+            .where(col("patient_id").isNull())
+            .select("file", "line")
+            .toJavaRDD()
+            .map(r -> new SourceLine(r.getInt(0), r.getInt(1)))
             .collect());
   }
 
   /** Ids of all kept admissions. */
   KeySet kept() {
-    List<long[]> parts = settled.mapPartitions(AdmissionIndex::hashes).collect();
+    List<long[]> parts =
+        settled
+            .where(col("patient_id").isNotNull().and(col("block").isNull()))
+            .select("hash")
+            .toJavaRDD()
+            .mapPartitions(AdmissionIndex::hashes)
+            .collect();
     return KeySet.of(parts.stream().flatMapToLong(Arrays::stream).toArray());
   }
 
   /** Blocks of {@code unit_stays}, by patient. */
-  JavaRDD<Row> staysByPatient() {
-    return settled
-        .filter(r -> !r.isNullAt(1))
-        .map(r -> RowFactory.create(r.getString(0), r.getAs(1)));
+  Dataset<Row> staysByPatient() {
+    return settled.where(col("block").isNotNull()).select("patient_id", "block");
   }
 
   void release() {
@@ -156,10 +177,7 @@ final class AdmissionIndex {
   private static Iterator<long[]> hashes(Iterator<Row> rows) {
     Iterable<Row> each = () -> rows;
     long[] hashes =
-        StreamSupport.stream(each.spliterator(), false)
-            .filter(r -> !r.isNullAt(0) && r.isNullAt(1))
-            .mapToLong(r -> r.getLong(4))
-            .toArray();
+        StreamSupport.stream(each.spliterator(), false).mapToLong(r -> r.getLong(0)).toArray();
     return List.of(hashes).iterator();
   }
 }

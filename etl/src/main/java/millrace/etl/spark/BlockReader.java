@@ -2,10 +2,9 @@ package millrace.etl.spark;
 
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
-import java.util.HashMap;
 import java.util.Iterator;
-import java.util.Map;
 import millrace.etl.contract.ContractTable;
 import millrace.etl.contract.FileLayout;
 import millrace.etl.parse.FileSurveyor;
@@ -44,34 +43,63 @@ final class BlockReader implements FlatMapFunction<BlockReader.Part, Row> {
 
   @Override
   public Iterator<Row> call(Part part) {
-    Map<String, PatientBlock> blocks = new HashMap<>();
-    int keyColumn =
-        part.table() == ContractTable.UNIT_STAYS
-            ? part.table().column("admission_id")
-            : part.table().column("patient_id");
-    RowFields fields = new RowFields(part.table().columns().size());
-    int[] columnOfField = part.layout().columnOfField();
+    RowArena arena = new RowArena();
+    Key key = new Key(part.table(), part.layout().columnOfField());
     long length = part.split().to() - part.split().from();
-    String lastKey = null;
-    PatientBlock lastBlock = null;
     try (RecordReader reader = FileSurveyor.open(Path.of(folder), part.path(), part.split())) {
       while (reader.nextPosition() < length && reader.next()) {
-        SourceLine source = new SourceLine(part.file(), (int) reader.line());
-        fields.split(
-            new RawRow(reader.buffer(), reader.from(), reader.to(), source), columnOfField);
-        String key = fields.isEmpty(keyColumn) ? keyless(fields.hash()) : fields.text(keyColumn);
-        if (!key.equals(lastKey)) {
-          lastKey = key;
-          lastBlock = blocks.computeIfAbsent(key, k -> new PatientBlock(part.table(), part.file()));
-        }
-        lastBlock.add(reader.line(), reader.buffer(), reader.from(), reader.to());
+        key.find(reader);
+        arena.add(
+            reader.line(),
+            reader.buffer(),
+            reader.from(),
+            reader.to(),
+            key.bytes,
+            key.range[0],
+            key.range[1]);
       }
     } catch (IOException e) {
       throw new UncheckedIOException(part.path() + " changed or cannot be read any more", e);
     }
-    return blocks.entrySet().stream()
-        .map(e -> RowFactory.create(e.getKey(), e.getValue().packed()))
+    return arena.packed(part.table().ordinal(), part.file()).stream()
+        .map(b -> RowFactory.create(b.key(), b.block()))
         .iterator();
+  }
+
+  /** The key of the record read last. */
+  private static final class Key {
+    private final int column;
+    private final int field;
+    private final int[] columnOfField;
+    private final RowFields fields;
+    private final int[] range = new int[2];
+    private byte[] bytes = new byte[0];
+
+    Key(ContractTable table, int[] columnOfField) {
+      this.column = table.column(table == ContractTable.UNIT_STAYS ? "admission_id" : "patient_id");
+      this.columnOfField = columnOfField;
+      this.fields = new RowFields(table.columns().size());
+      int at = 0;
+      while (columnOfField[at] != column) {
+        at++;
+      }
+      this.field = at;
+    }
+
+    void find(RecordReader reader) {
+      bytes = reader.buffer();
+      if (RowFields.findPlain(bytes, reader.from(), reader.to(), field, range)
+          && range[0] < range[1]) {
+        return;
+      }
+      SourceLine nowhere = new SourceLine(0, 0);
+      fields.split(new RawRow(reader.buffer(), reader.from(), reader.to(), nowhere), columnOfField);
+      bytes =
+          (fields.isEmpty(column) ? keyless(fields.hash()) : fields.text(column))
+              .getBytes(StandardCharsets.UTF_8);
+      range[0] = 0;
+      range[1] = bytes.length;
+    }
   }
 
   /** The group of a row that names no patient or admission; equal rows share it. */

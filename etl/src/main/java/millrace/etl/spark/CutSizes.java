@@ -9,5 +9,5 @@ package millrace.etl.spark;
  */
 public record CutSizes(long splitBytes, long bucketBytes) {
   /** The sizes of a run. */
-  public static final CutSizes DEFAULT = new CutSizes(32L << 20, 40L << 20);
+  public static final CutSizes DEFAULT = new CutSizes(32L << 20, 96L << 20);
 }

@@ -107,7 +107,7 @@ public final class ExtractReader {
         new CheckContext(descriptor.cover(), layouts, units, codes, index.kept(), index.repeated());
     Dataset<Row> bulk =
         blocks(files, layouts, t -> !SMALL.contains(t) && t != ContractTable.UNIT_STAYS);
-    Dataset<Row> all = bulk.union(BlockFrames.of(spark, index.staysByPatient()));
+    Dataset<Row> all = bulk.union(index.staysByPatient());
     return new ReadExtract(
         descriptor,
         files,

@@ -13,19 +13,21 @@ import millrace.etl.record.SourceLine;
  * equal rows, rules and the quarantine see what the extract says.
  */
 final class PatientBlock {
-  private static final int FIRST_SIZE = 160;
-  private byte[] bytes = new byte[FIRST_SIZE];
+  private static final int LONGEST_NUMBER = 10;
+  private byte[] bytes;
   private int size;
   private long lastLine;
 
-  PatientBlock(ContractTable table, int file) {
-    bytes[size++] = (byte) table.ordinal();
+  /** A block with room for that many rows and bytes of text. */
+  PatientBlock(int table, int file, int rows, int text) {
+    bytes = new byte[text + rows * 6 + LONGEST_NUMBER];
+    bytes[size++] = (byte) table;
     putNumber(file);
   }
 
   void add(long line, byte[] source, int from, int to) {
     int length = to - from;
-    ensure(length + 20);
+    ensure(length + 2 * LONGEST_NUMBER);
     putNumber(line - lastLine);
     putNumber(length);
     System.arraycopy(source, from, bytes, size, length);
@@ -34,7 +36,7 @@ final class PatientBlock {
   }
 
   byte[] packed() {
-    return Arrays.copyOf(bytes, size);
+    return size == bytes.length ? bytes : Arrays.copyOf(bytes, size);
   }
 
   /** Unpacks a block into the lists of its table. */
@@ -59,7 +61,7 @@ final class PatientBlock {
   }
 
   private void putNumber(long number) {
-    ensure(10);
+    ensure(LONGEST_NUMBER);
     long rest = number;
     while (rest >= 0x80) {
       bytes[size++] = (byte) (rest | 0x80);
