@@ -3,7 +3,10 @@ package millrace.analytics.command;
 import java.io.PrintStream;
 import millrace.analytics.spark.Progress;
 
-/** Progress for people: a bar that redraws itself on a terminal, a line a step elsewhere. */
+/**
+ * Progress for people: a bar on standard error that redraws itself on a terminal, a line a step on
+ * standard output elsewhere.
+ */
 final class PlainProgress implements Progress {
   private static final int WIDTH = 30;
 
@@ -11,8 +14,8 @@ final class PlainProgress implements Progress {
   private final boolean terminal;
   private String step = "";
 
-  PlainProgress(PrintStream out, boolean terminal) {
-    this.out = out;
+  PlainProgress(boolean terminal) {
+    this.out = terminal ? System.err : System.out;
     this.terminal = terminal;
   }
 

@@ -20,7 +20,8 @@ final class SparkOptions {
   @Option(
       names = "--progress",
       paramLabel = "plain|json",
-      description = "how progress is written to standard error; default: plain")
+      description =
+          "how progress is written: a bar or a line a step, or JSON lines on standard error; default: plain")
   private ProgressForm progress = ProgressForm.PLAIN;
 
   @Option(names = "--verbose", description = "stack traces and Spark's own log")
@@ -41,7 +42,7 @@ final class SparkOptions {
   Progress progress() {
     return progress == ProgressForm.JSON
         ? new JsonProgress(System.err)
-        : new PlainProgress(System.err, System.console() != null);
+        : new PlainProgress(System.console() != null);
   }
 
   SparkSession start() {

@@ -35,12 +35,19 @@ final class RecordWriteSupport<T extends Record> extends WriteSupport<T> {
   private final MessageType schema;
   private final List<String> names;
   private final MethodHandle[] accessors;
+
+  /** The last text of each column: ids and files repeat from row to row. */
+  private final String[] lastTexts;
+
+  private final Binary[] lastBinaries;
   private RecordConsumer consumer;
 
   RecordWriteSupport(Class<T> rowType) {
     RecordComponent[] components = rowType.getRecordComponents();
     names = Columns.of(rowType);
     accessors = new MethodHandle[components.length];
+    lastTexts = new String[components.length];
+    lastBinaries = new Binary[components.length];
     List<Type> fields = new ArrayList<>();
     for (int i = 0; i < components.length; i++) {
       fields.add(field(components[i], names.get(i)));
@@ -73,16 +80,20 @@ final class RecordWriteSupport<T extends Record> extends WriteSupport<T> {
       Object value = value(accessors[i], row);
       if (value != null) {
         consumer.startField(names.get(i), i);
-        put(value);
+        put(i, value);
         consumer.endField(names.get(i), i);
       }
     }
     consumer.endMessage();
   }
 
-  private void put(Object value) {
+  private void put(int column, Object value) {
     if (value instanceof String text) {
-      consumer.addBinary(Binary.fromString(text));
+      if (!text.equals(lastTexts[column])) {
+        lastTexts[column] = text;
+        lastBinaries[column] = Binary.fromString(text);
+      }
+      consumer.addBinary(lastBinaries[column]);
     } else if (value instanceof Long number) {
       consumer.addLong(number);
     } else if (value instanceof Integer number) {

@@ -1,5 +1,6 @@
 package millrace.analytics.spark;
 
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
 import millrace.analytics.exposure.DrugLists;
@@ -19,7 +20,8 @@ public record RunPlan(Path extract, Policy policy, Subjects subjects) {
   /**
    * The plan of a call.
    *
-   * @param policyFile the policy file, or empty for the defaults; files it names lie beside it
+   * @param policyFile the policy file, or empty for the defaults; files it names lie beside it, or
+   *     where the program was called
    * @throws millrace.analytics.policy.PolicyException if the policy, watchlist or combinations
    *     cannot be used
    */
@@ -36,11 +38,13 @@ public record RunPlan(Path extract, Policy policy, Subjects subjects) {
                 beside(policyFile, policy.exposure().combinationsFile()), watchlist)));
   }
 
+  /** A file that a policy names: beside the policy file, else where the program was called. */
   private static Optional<Path> beside(Optional<Path> policyFile, String name) {
     if (name.isEmpty()) {
       return Optional.empty();
     }
-    return Optional.of(
-        policyFile.map(p -> p.toAbsolutePath().resolveSibling(name)).orElse(Path.of(name)));
+    Path here = Path.of(name);
+    Path beside = policyFile.map(p -> p.toAbsolutePath().resolveSibling(name)).orElse(here);
+    return Optional.of(Files.exists(beside) || !Files.exists(here) ? beside : here);
   }
 }
