@@ -1,0 +1,2 @@
+/** Published and invented cases, end to end through the extract contract. */
+package millrace.analytics.cases;
