@@ -1,0 +1,21 @@
+package millrace.ui.page;
+
+import com.vaadin.flow.router.BeforeEnterEvent;
+import com.vaadin.flow.router.ErrorParameter;
+import com.vaadin.flow.router.HasErrorParameter;
+import com.vaadin.flow.router.NotFoundException;
+
+/** There is nothing at this address. */
+public class NotFoundPage extends Trouble implements HasErrorParameter<NotFoundException> {
+  private static final long serialVersionUID = 1L;
+
+  @Override
+  public int setErrorParameter(BeforeEnterEvent event, ErrorParameter<NotFoundException> parameter) {
+    String what = parameter.getCustomMessage();
+    say(
+        "There is no such page",
+        what == null || what.isBlank() ? "Nothing is at this address." : what,
+        "Addresses of episodes change with each run.");
+    return 404;
+  }
+}
