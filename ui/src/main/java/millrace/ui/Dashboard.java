@@ -1,9 +1,9 @@
 package millrace.ui;
 
-import com.vaadin.flow.component.dependency.StyleSheet;
 import com.vaadin.flow.component.page.AppShellConfigurator;
 import com.vaadin.flow.component.page.Viewport;
 import com.vaadin.flow.server.AppShellSettings;
+import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.Map;
@@ -16,7 +16,6 @@ import org.springframework.core.env.Environment;
 
 /** Starts the dashboard on 127.0.0.1. */
 @SpringBootApplication
-@StyleSheet("context://millrace.css")
 @Viewport("width=device-width, initial-scale=1")
 public class Dashboard implements AppShellConfigurator {
   /** The setting that holds the mart's folder. */
@@ -62,6 +61,6 @@ public class Dashboard implements AppShellConfigurator {
   /** The mart that all pages read. */
   @Bean
   Mart mart(Environment environment) {
-    return new Mart(java.nio.file.Path.of(environment.getRequiredProperty(MART)));
+    return new Mart(Path.of(environment.getRequiredProperty(MART)));
   }
 }

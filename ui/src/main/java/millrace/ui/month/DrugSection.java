@@ -4,6 +4,7 @@ import com.vaadin.flow.component.html.Section;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.Collectors;
 import millrace.analytics.mart.DrugRateRow;
 import millrace.analytics.rates.Incidence;
 import millrace.analytics.rates.RiskSum;
@@ -54,16 +55,29 @@ final class DrugSection {
               REST + ROW * points.size(),
               RateCharts.ratios(points)));
     }
-    section.add(table(rows));
-    long few = rows.stream().filter(r -> r.pMid().isEmpty()).count();
+    List<DrugRateRow> seen = rows.stream().filter(r -> r.exposedSeconds() > 0).toList();
+    section.add(table(seen));
+    if (seen.size() < rows.size()) {
+      section.add(
+          Html.paragraph(
+              "say",
+              "Without exposed time: "
+                  + rows.stream()
+                      .filter(r -> r.exposedSeconds() <= 0)
+                      .map(DrugRateRow::subject)
+                      .sorted(String.CASE_INSENSITIVE_ORDER)
+                      .collect(Collectors.joining(", "))
+                  + "."));
+    }
+    long few = seen.stream().filter(r -> r.pMid().isEmpty()).count();
     if (few > 0) {
       section.add(
           Html.paragraph(
               "say",
               Say.count(few)
                   + " of "
-                  + Say.count(rows.size())
-                  + " classes have too few episodes or exposed days for a ratio; their counts stand in the table."));
+                  + Say.count(seen.size())
+                  + " classes with exposed time have too few episodes or exposed days for a ratio; their counts stand in the table."));
     }
     return section;
   }

@@ -1,5 +1,6 @@
 package millrace.ui.page;
 
+import com.vaadin.flow.component.dependency.StyleSheet;
 import com.vaadin.flow.component.html.Div;
 import com.vaadin.flow.component.html.Main;
 import com.vaadin.flow.router.BeforeEnterEvent;
@@ -11,6 +12,7 @@ import millrace.ui.mart.MartException;
 import millrace.ui.mart.Run;
 
 /** A page of the served run, built anew at each visit. */
+@StyleSheet("context://millrace.css")
 public abstract class Page extends Div implements BeforeEnterObserver, HasDynamicTitle {
   private static final long serialVersionUID = 1L;
 

@@ -1,11 +1,13 @@
 package millrace.ui.page;
 
+import com.vaadin.flow.component.dependency.StyleSheet;
 import com.vaadin.flow.component.html.Div;
 import com.vaadin.flow.component.html.H1;
 import com.vaadin.flow.component.html.Paragraph;
 import com.vaadin.flow.router.HasDynamicTitle;
 
 /** A page that says in words what is wrong and how to go on. */
+@StyleSheet("context://millrace.css")
 abstract class Trouble extends Div implements HasDynamicTitle {
   private static final long serialVersionUID = 1L;
 
