@@ -15,6 +15,12 @@ public final class RateCharts {
       "'axisLabel':{'color':'var(--soft)'},'axisLine':{'lineStyle':{'color':'var(--line)'}},"
           + "'axisTick':{'show':false},'splitLine':{'lineStyle':{'color':'var(--line)'}}";
 
+  /** No ratio is drawn beyond this, or below its inverse. */
+  private static final double REACH = 32;
+
+  private static final int LETTER = 7;
+  private static final int MOST_LEFT = 240;
+
   private RateCharts() {}
 
   /** Values in the order of time, upright. */
@@ -35,9 +41,16 @@ public final class RateCharts {
 
   /** Values side by side, lying, on one scale. */
   public static ObjectNode lying(List<RatePoint> points) {
-    List<RatePoint> down = reversed(points);
-    ObjectNode options = base("{'left':8,'right':24,'top':8,'bottom':8,'containLabel':true}");
-    options.set("xAxis", Json.object("{'type':'value','min':0," + AXIS + "}"));
+    double counted = highest(points.stream().filter(p -> p.value().orElse(0) > 0).toList());
+    double end = counted > 0 ? counted : highest(points);
+    List<RatePoint> down = reversed(points.stream().map(p -> clipped(p, 0, end)).toList());
+    ObjectNode options = base(room(down));
+    ObjectNode axis = Json.object("{'type':'value','min':0," + AXIS + "}");
+    axis.withObject("/axisLabel").put("showMaxLabel", false);
+    if (end > 0) {
+      axis.put("max", end);
+    }
+    options.set("xAxis", axis);
     options.set("yAxis", names(down));
     options.putArray("series").add(whiskers(down)).add(dots(down, true, "circle"));
     return options;
@@ -45,16 +58,18 @@ public final class RateCharts {
 
   /** Ratios, lying, on a scale of logarithms around 1; the second value is hollow. */
   public static ObjectNode ratios(List<RatePoint> points) {
-    double reach = 2;
+    double most = 2;
+    double least = 0.5;
     for (RatePoint p : points) {
-      reach = Math.max(reach, Math.max(p.upper().orElse(1), 1 / Math.max(0.02, p.lower().orElse(1))));
-      reach = Math.max(reach, Math.max(p.second().orElse(1), 1 / Math.max(0.02, p.second().orElse(1))));
+      most = Math.max(most, Math.max(p.upper().orElse(1), p.second().orElse(1)));
+      least = Math.min(least, Math.min(p.lower().orElse(1), p.second().orElse(1)));
     }
-    double end = Math.pow(2, Math.ceil(Math.log(Math.min(reach, 32)) / Math.log(2)));
-    List<RatePoint> down = reversed(points.stream().map(p -> clipped(p, end)).toList());
-    ObjectNode options = base("{'left':8,'right':24,'top':8,'bottom':8,'containLabel':true}");
+    double end = powerOfTwo(Math.ceil(Math.log(Math.min(most, REACH)) / Math.log(2)));
+    double start = powerOfTwo(Math.floor(Math.log(Math.max(least, 1 / REACH)) / Math.log(2)));
+    List<RatePoint> down = reversed(points.stream().map(p -> clipped(p, start, end)).toList());
+    ObjectNode options = base(room(down));
     ObjectNode axis = Json.object("{'type':'log','logBase':2," + AXIS + "}");
-    axis.put("min", 1 / end).put("max", end);
+    axis.put("min", start).put("max", end);
     options.set("xAxis", axis);
     options.set("yAxis", names(down));
     ObjectNode dots = dots(down, true, "rect");
@@ -77,20 +92,35 @@ public final class RateCharts {
     return options;
   }
 
-  private static RatePoint clipped(RatePoint p, double end) {
+  private static double powerOfTwo(double power) {
+    return Math.pow(2, power);
+  }
+
+  private static double highest(List<RatePoint> points) {
+    return points.stream().mapToDouble(p -> p.upper().orElse(0)).max().orElse(0);
+  }
+
+  /** Room for the longest name. */
+  private static String room(List<RatePoint> points) {
+    int letters = points.stream().mapToInt(p -> p.name().length()).max().orElse(0);
+    int left = Math.min(MOST_LEFT, letters * LETTER + 12);
+    return "{'left':" + left + ",'right':24,'top':8,'bottom':26}";
+  }
+
+  private static RatePoint clipped(RatePoint p, double start, double end) {
     return new RatePoint(
         p.name(),
-        clip(p.value(), end),
-        p.lower().isEmpty() ? p.lower() : clip(p.lower(), end),
-        p.upper().isEmpty() && p.lower().isPresent() ? OptionalDouble.of(end) : clip(p.upper(), end),
-        clip(p.second(), end),
+        clip(p.value(), start, end),
+        p.lower().isEmpty() ? p.lower() : clip(p.lower(), start, end),
+        p.upper().isEmpty() && p.lower().isPresent() ? OptionalDouble.of(end) : clip(p.upper(), start, end),
+        clip(p.second(), start, end),
         p.marked());
   }
 
-  private static OptionalDouble clip(OptionalDouble value, double end) {
+  private static OptionalDouble clip(OptionalDouble value, double start, double end) {
     return value.isEmpty()
         ? value
-        : OptionalDouble.of(Math.min(end, Math.max(1 / end, value.getAsDouble())));
+        : OptionalDouble.of(Math.min(end, Math.max(start, value.getAsDouble())));
   }
 
   private static ObjectNode base(String grid) {
@@ -103,7 +133,7 @@ public final class RateCharts {
   private static ObjectNode names(List<RatePoint> points) {
     ObjectNode category =
         Json.object(
-            "{'type':'category','axisLabel':{'color':'var(--ink)','interval':0},"
+            "{'type':'category','axisLabel':{'color':'var(--ink)','interval':0,'width':230,'overflow':'truncate'},"
                 + "'axisLine':{'show':false},'axisTick':{'show':false}}");
     category.set("data", Json.array(points.stream().map(RatePoint::name).toList()));
     return category;

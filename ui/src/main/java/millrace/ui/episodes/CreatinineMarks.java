@@ -107,6 +107,7 @@ final class CreatinineMarks {
         dot.put("symbolSize", 12);
         dot.putObject("label")
             .put("show", true)
+            .put("position", decision.equals("onset") ? "left" : "top")
             .put("formatter", decision + " " + unit.say(r.nanomolesPerLitre()));
       }
     }

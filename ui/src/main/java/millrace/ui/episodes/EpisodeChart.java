@@ -125,7 +125,7 @@ final class EpisodeChart {
             unit.unit(),
             CREATININE,
             Json.object(
-                "{'type':'value','scale':true,'axisLabel':{'color':'var(--soft)'},'splitLine':{'show':false},"
+                "{'type':'value','scale':true,'axisLabel':{'color':'var(--soft)','showMinLabel':false,'showMaxLabel':false},'splitLine':{'show':false},"
                     + "'axisLine':{'show':false},'axisTick':{'show':false}}"));
     CreatinineMarks marks = new CreatinineMarks(data, unit, clock);
     ((ObjectNode) values.get(at)).put("min", marks.least()).put("max", marks.most());
@@ -152,7 +152,7 @@ final class EpisodeChart {
             "mmHg, floor " + Math.round(data.floor()),
             PRESSURE,
             Json.object(
-                "{'type':'value','scale':true,'axisLabel':{'color':'var(--soft)'},'splitLine':{'show':false},"
+                "{'type':'value','scale':true,'axisLabel':{'color':'var(--soft)','showMinLabel':false,'showMaxLabel':false},'splitLine':{'show':false},"
                     + "'splitNumber':3,'axisLine':{'show':false},'axisTick':{'show':false}}"));
     ObjectNode readings =
         Json.object(

@@ -26,9 +26,7 @@ final class EpisodeLead {
             + clock.full(e.onsetAt())
             + ", "
             + where
-            + " (the day before: "
-            + (where.equals(before) ? "the same" : before)
-            + ").");
+            + (where.equals(before) ? ", the day before too." : "; the day before, " + before + "."));
     sentences.add(creatinine(e, unit));
     sentences.add(links(data));
     sentences.add(
@@ -61,9 +59,9 @@ final class EpisodeLead {
     e.closedAt()
         .ifPresentOrElse(
             closed ->
-                said.append(" and the episode closed after ")
+                said.append(", and the episode closed after ")
                     .append(Clock.span(e.onsetAt(), closed)),
-            () -> said.append(" and the episode had not closed when the cover ended"));
+            () -> said.append(", and the episode had not closed when the cover ended"));
     return said.append('.').toString();
   }
 

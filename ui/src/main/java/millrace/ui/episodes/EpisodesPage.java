@@ -64,18 +64,18 @@ public final class EpisodesPage extends Page {
     grid.addComponentColumn(e -> Html.link("episodes/" + e.episodeId(), e.episodeId()))
         .setHeader("episode")
         .setFrozen(true)
-        .setWidth("112px")
+        .setWidth("92px")
         .setFlexGrow(0);
-    column(grid, "onset", 130, e -> clock.full(e.onsetAt()));
-    column(grid, "unit", 150, e -> EpisodeWords.unit(e.unitAtOnset(), names));
-    column(grid, "stage", 64, e -> Integer.toString(e.stage()));
-    column(grid, "origin", 100, EpisodeRow::origin);
-    column(grid, "evidence", 160, e -> EpisodeWords.evidence(e.evidence()));
-    column(grid, "reference", 90, e -> Creatinine.MG.say(e.referenceNanomolesPerLitre()));
-    column(grid, "peak, mg/dL", 90, e -> Creatinine.MG.say(e.peakNanomolesPerLitre()));
-    column(grid, "linked agents", 190, e -> e.linkedAgents().replace(";", ", "));
-    column(grid, "minutes low", 84, e -> Say.days(e.minutesLow()));
-    column(grid, "outcome", 120, e -> e.outcome().orElse("–").replace('-', ' '));
+    column(grid, "onset", 116, e -> clock.full(e.onsetAt()));
+    column(grid, "unit", 140, e -> EpisodeWords.unit(e.unitAtOnset(), names));
+    column(grid, "stage", 60, e -> Integer.toString(e.stage()));
+    column(grid, "origin", 106, EpisodeRow::origin);
+    column(grid, "evidence", 150, e -> EpisodeWords.evidence(e.evidence()));
+    column(grid, "reference", 92, e -> Creatinine.MG.say(e.referenceNanomolesPerLitre()));
+    column(grid, "peak, mg/dL", 76, e -> Creatinine.MG.say(e.peakNanomolesPerLitre()));
+    column(grid, "linked agents", 152, e -> e.linkedAgents().replace(";", ", "));
+    column(grid, "minutes low", 76, e -> Say.days(e.minutesLow()));
+    column(grid, "outcome", 96, e -> e.outcome().orElse("–").replace('-', ' '));
     grid.setItems(
         query ->
             run

@@ -32,7 +32,7 @@ final class UnitSection {
     String say =
         "Episodes per 1,000 patient-days at risk, all on one scale, each by the unit "
             + MonthPage.words(at.attribution())
-            + ". A unit that tests more finds more.";
+            + ". A unit that tests more finds more. The upper limit of a unit without an episode may run past the scale; the table has it.";
     if (units.isEmpty()) {
       return Html.section("Where", "No unit has time at risk in this month.", turn);
     }

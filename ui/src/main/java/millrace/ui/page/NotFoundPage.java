@@ -11,11 +11,10 @@ public class NotFoundPage extends Trouble implements HasErrorParameter<NotFoundE
 
   @Override
   public int setErrorParameter(BeforeEnterEvent event, ErrorParameter<NotFoundException> parameter) {
-    String what = parameter.getCustomMessage();
     say(
         "There is no such page",
-        what == null || what.isBlank() ? "Nothing is at this address." : what,
-        "Addresses of episodes change with each run.");
+        "The served run has no page or episode at this address.",
+        "Episodes get new names with each run.");
     return 404;
   }
 }
