@@ -38,7 +38,7 @@ public final class Tally {
   public void addFindings(Findings findings) {
     findings.forEach(
         (key, rows) ->
-            add(Group.FINDING, key.kind().word(), key.table().tableName(), key.detail(), rows));
+            add(Group.FINDING, key.kind().word(), key.table(), key.detail(), rows));
   }
 
   /** A sum; 0 when nothing was added. */

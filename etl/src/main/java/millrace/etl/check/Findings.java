@@ -11,11 +11,10 @@ public final class Findings {
    * What is counted together.
    *
    * @param kind kind of finding
-   * @param table table
+   * @param table name of the table
    * @param detail column, code or word; may be empty, never a value of a patient
    */
-  public record Key(FindingKind kind, ContractTable table, String detail)
-      implements Comparable<Key> {
+  public record Key(FindingKind kind, String table, String detail) implements Comparable<Key> {
     @Override
     public int compareTo(Key other) {
       int byKind = kind.compareTo(other.kind);
@@ -28,7 +27,7 @@ public final class Findings {
 
   /** Counts one. */
   public void count(FindingKind kind, ContractTable table, String detail) {
-    add(new Key(kind, table, detail), 1);
+    add(new Key(kind, table.tableName(), detail), 1);
   }
 
   /** Adds a count. */

@@ -108,7 +108,9 @@ public final class PatientCheck {
     if (merged > 0) {
       accounting.add(ContractTable.BLOOD_PRESSURES, new Accounting.Line(0, -merged, merged, 0));
       findings.add(
-          new Findings.Key(FindingKind.RIVAL_PRESSURES, ContractTable.BLOOD_PRESSURES, ""), merged);
+          new Findings.Key(
+              FindingKind.RIVAL_PRESSURES, ContractTable.BLOOD_PRESSURES.tableName(), ""),
+          merged);
     }
     return standing;
   }

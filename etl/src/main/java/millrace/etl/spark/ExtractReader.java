@@ -200,7 +200,7 @@ public final class ExtractReader {
       Findings findings) {
     descriptor
         .unknownResources()
-        .forEach(r -> findings.count(FindingKind.UNKNOWN_TABLE, ContractTable.PATIENTS, r));
+        .forEach(r -> findings.add(new Findings.Key(FindingKind.UNKNOWN_TABLE, r, ""), 1));
     for (int i = 0; i < files.size(); i++) {
       for (String column : layouts.get(i).unknownColumns()) {
         findings.count(FindingKind.UNKNOWN_COLUMN, files.get(i).table(), column);
