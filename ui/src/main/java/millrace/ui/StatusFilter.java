@@ -51,8 +51,7 @@ public class StatusFilter extends OncePerRequestFilter {
   private int status(String path) {
     try {
       if (path.startsWith(EPISODES) && path.length() > EPISODES.length()) {
-        Condition condition =
-            Condition.equal("episode_id", path.substring(EPISODES.length()));
+        Condition condition = Condition.equal("episode_id", path.substring(EPISODES.length()));
         return mart.open().count(EpisodeRow.class, condition) > 0
             ? HttpServletResponse.SC_OK
             : HttpServletResponse.SC_NOT_FOUND;

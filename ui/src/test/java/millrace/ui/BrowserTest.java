@@ -49,8 +49,7 @@ class BrowserTest {
     server =
         new SpringApplicationBuilder(Dashboard.class)
             .run("--server.port=0", "--" + Dashboard.MART + "=" + mart);
-    root =
-        "http://127.0.0.1:" + server.getEnvironment().getProperty("local.server.port") + "/";
+    root = "http://127.0.0.1:" + server.getEnvironment().getProperty("local.server.port") + "/";
     ChromeOptions options = new ChromeOptions();
     options.setBinary(BROWSER.toFile());
     options.addArguments(
@@ -65,7 +64,9 @@ class BrowserTest {
         "--window-size=1440,1000",
         "--user-data-dir=" + folder.resolve("browser"));
     ChromeDriverService service =
-        new ChromeDriverService.Builder().usingDriverExecutable(new File(DRIVER.toString())).build();
+        new ChromeDriverService.Builder()
+            .usingDriverExecutable(new File(DRIVER.toString()))
+            .build();
     browser = new ChromeDriver(service, options);
     wait = new WebDriverWait(browser, Duration.ofSeconds(30));
   }
@@ -94,7 +95,8 @@ class BrowserTest {
     assertTrue(browser.getPageSource().contains("not linked: first dose 2 hours before onset"));
     assertTrue(browser.getTitle().startsWith("Episode e-0-1"), browser.getTitle());
     browser.findElement(By.partialLinkText("show µmol/L")).click();
-    wait.until(ExpectedConditions.textToBePresentInElementLocated(By.className("lead"), "170 µmol/L"));
+    wait.until(
+        ExpectedConditions.textToBePresentInElementLocated(By.className("lead"), "170 µmol/L"));
   }
 
   @Test

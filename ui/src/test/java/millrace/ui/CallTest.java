@@ -31,8 +31,7 @@ class CallTest {
     MartFixture.write(folder);
     try (ServerSocket taken = new ServerSocket(0, 1, InetAddress.getByName(Call.HOST))) {
       Call call = new Call(folder, taken.getLocalPort());
-      assertTrue(
-          assertThrows(Call.WrongCall.class, call::check).getMessage().contains("in use"));
+      assertTrue(assertThrows(Call.WrongCall.class, call::check).getMessage().contains("in use"));
     }
   }
 

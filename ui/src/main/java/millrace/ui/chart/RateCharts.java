@@ -25,7 +25,7 @@ public final class RateCharts {
 
   /** Values in the order of time, upright. */
   public static ObjectNode upright(List<RatePoint> points) {
-    ObjectNode options = base("{'left':44,'right':14,'top':14,'bottom':28}");
+    ObjectNode options = base("{'left':58,'right':14,'top':14,'bottom':28}");
     ObjectNode category = Json.object("{'type':'category'," + AXIS + "}");
     category.set("data", Json.array(points.stream().map(RatePoint::name).toList()));
     options.set("xAxis", category);
@@ -112,7 +112,9 @@ public final class RateCharts {
         p.name(),
         clip(p.value(), start, end),
         p.lower().isEmpty() ? p.lower() : clip(p.lower(), start, end),
-        p.upper().isEmpty() && p.lower().isPresent() ? OptionalDouble.of(end) : clip(p.upper(), start, end),
+        p.upper().isEmpty() && p.lower().isPresent()
+            ? OptionalDouble.of(end)
+            : clip(p.upper(), start, end),
         clip(p.second(), start, end),
         p.marked());
   }

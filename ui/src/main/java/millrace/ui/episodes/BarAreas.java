@@ -10,7 +10,7 @@ import millrace.ui.chart.Json;
 /** Spans of time as bars. */
 final class BarAreas {
   /** Narrower than this share of the axis, a bar has no room for a name. */
-  private static final double ROOM_PER_LETTER = 0.0095;
+  private static final double ROOM_PER_LETTER = 0.0078;
 
   private final EpisodeData data;
   private final Clock clock;
@@ -55,7 +55,8 @@ final class BarAreas {
     } else {
       first.put("name", " ");
     }
-    first.putObject("itemStyle")
+    first
+        .putObject("itemStyle")
         .put("color", light ? "var(--water3)" : "var(--water2)")
         .put("borderColor", "var(--paper)")
         .put("borderWidth", 1);

@@ -60,7 +60,8 @@ final class CreatinineMarks {
               border(borders, reference, "ref. " + unit.say(reference), "solid", "var(--ink)");
               for (double times : BORDERS) {
                 if (unit.value(reference * times) <= most()) {
-                  String label = (times == BORDERS[0] ? "1.5" : Integer.toString((int) times)) + " ×";
+                  String label =
+                      (times == BORDERS[0] ? "1.5" : Integer.toString((int) times)) + " ×";
                   border(borders, reference * times, label, "dashed", "var(--water2)");
                 }
               }

@@ -63,8 +63,11 @@ final class DoseRows {
     for (int i = 0; i < rows.size(); i++) {
       for (DoseLine dose : rows.get(i)) {
         if (dose.endedAt().filter(e -> e.isAfter(dose.startedAt())).isPresent()) {
-          long from = clock.wall(dose.startedAt().isBefore(data.from()) ? data.from() : dose.startedAt());
-          long to = clock.wall(dose.endedAt().get().isAfter(data.to()) ? data.to() : dose.endedAt().get());
+          long from =
+              clock.wall(dose.startedAt().isBefore(data.from()) ? data.from() : dose.startedAt());
+          long to =
+              clock.wall(
+                  dose.endedAt().get().isAfter(data.to()) ? data.to() : dose.endedAt().get());
           points.addArray().add(from).add(i);
           points.addArray().add(to).add(i);
           points.addArray().add(to).add("-");

@@ -6,7 +6,10 @@ import java.time.Duration;
 import java.time.Instant;
 import millrace.ui.chart.Json;
 
-/** Panels one above the other on one time axis: creatinine, doses, mean pressure, units, replacements. */
+/**
+ * Panels one above the other on one time axis: creatinine, doses, mean pressure, units,
+ * replacements.
+ */
 final class EpisodeChart {
   private static final int LEFT = 190;
   private static final int RIGHT = 92;
@@ -64,7 +67,12 @@ final class EpisodeChart {
   /** Adds a panel with its axes and shading; gives its number. */
   private int panel(String title, String below, int height, ObjectNode value) {
     int at = grids.size();
-    grids.addObject().put("left", LEFT).put("right", RIGHT).put("top", bottom).put("height", height);
+    grids
+        .addObject()
+        .put("left", LEFT)
+        .put("right", RIGHT)
+        .put("top", bottom)
+        .put("height", height);
     ObjectNode time =
         Json.object(
             "{'type':'time','axisLabel':{'show':false,'color':'var(--soft)','hideOverlap':true,"
@@ -187,12 +195,7 @@ final class EpisodeChart {
   }
 
   private void bars(String title, ArrayNode areas) {
-    int at =
-        panel(
-            title,
-            "",
-            BAR,
-            Json.object("{'type':'value','min':0,'max':1,'show':false}"));
+    int at = panel(title, "", BAR, Json.object("{'type':'value','min':0,'max':1,'show':false}"));
     ObjectNode bars =
         Json.object(
             "{'type':'scatter','silent':true,'data':[],'markArea':{'silent':true,"

@@ -59,8 +59,7 @@ record EpisodeData(
 
   private static EpisodeData around(Run run, EpisodeRow episode) {
     Instant from = episode.onsetAt().minus(AROUND);
-    Instant to =
-        episode.closedAt().or(episode::peakAt).orElse(episode.onsetAt()).plus(AROUND);
+    Instant to = episode.closedAt().or(episode::peakAt).orElse(episode.onsetAt()).plus(AROUND);
     Condition patient = Condition.equal("patient_id", episode.patientId());
     Function<Instant, Boolean> shown = t -> !t.isBefore(from) && !t.isAfter(to);
     return new EpisodeData(
@@ -71,9 +70,7 @@ record EpisodeData(
             .admissionId()
             .flatMap(
                 id ->
-                    run
-                        .rows(AdmissionRow.class, Condition.equal("admission_id", id), "")
-                        .stream()
+                    run.rows(AdmissionRow.class, Condition.equal("admission_id", id), "").stream()
                         .findFirst()),
         run.rows(ResultLine.class, patient, "ORDER BY collected_at, line").stream()
             .filter(r -> shown.apply(r.collectedAt()))
@@ -100,14 +97,14 @@ record EpisodeData(
   /** Doses whose time meets what is shown. */
   List<DoseLine> dosesShown() {
     return doses.stream()
-        .filter(d -> meets(d.startedAt(), d.endedAt().or(() -> Optional.of(d.startedAt())), from, to))
+        .filter(
+            d -> meets(d.startedAt(), d.endedAt().or(() -> Optional.of(d.startedAt())), from, to))
         .toList();
   }
 
   /** Whether an instant lies inside the episode. */
   boolean inside(Instant at) {
-    return !at.isBefore(episode.onsetAt())
-        && episode.closedAt().map(at::isBefore).orElse(true);
+    return !at.isBefore(episode.onsetAt()) && episode.closedAt().map(at::isBefore).orElse(true);
   }
 
   private static boolean meets(Instant start, Optional<Instant> end, Instant from, Instant to) {

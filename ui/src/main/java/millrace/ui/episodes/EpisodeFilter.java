@@ -70,8 +70,7 @@ public record EpisodeFilter(
         query.month("month"),
         query.text("unit"),
         query.word(
-            "attribution",
-            List.of(Attribution.AT_ONSET.word(), Attribution.DAY_BEFORE.word())),
+            "attribution", List.of(Attribution.AT_ONSET.word(), Attribution.DAY_BEFORE.word())),
         query.word("stage", STAGES),
         query.word("origin", ORIGINS),
         query.word("class", CLASSES),

@@ -26,7 +26,9 @@ final class EpisodeLead {
             + clock.full(e.onsetAt())
             + ", "
             + where
-            + (where.equals(before) ? ", the day before too." : "; the day before, " + before + "."));
+            + (where.equals(before)
+                ? ", the day before too."
+                : "; the day before, " + before + "."));
     sentences.add(creatinine(e, unit));
     sentences.add(links(data));
     sentences.add(

@@ -30,8 +30,7 @@ public final class EpisodePage extends Page {
   @Override
   protected String build(BeforeEnterEvent event, Run run, Main middle) {
     String id = event.getRouteParameters().get("episodeId").orElse("");
-    Map<String, List<String>> values =
-        event.getLocation().getQueryParameters().getParameters();
+    Map<String, List<String>> values = event.getLocation().getQueryParameters().getParameters();
     Creatinine unit =
         Query.of(values, Set.of("unit")).word("unit", List.of("mg", "umol")).stream()
             .map(u -> u.equals("umol") ? Creatinine.UMOL : Creatinine.MG)
@@ -65,7 +64,7 @@ public final class EpisodePage extends Page {
     middle.add(
         Html.paragraph(
             "say",
-            "Filled = inside the episode, or a dose that exposes; hollow = outside, or a dose that does not."
+            "Filled = inside the episode, or a dose that exposes; hollow = outside, or a dose that does not; diamond = a result masked by a replacement."
                 + " Shaded: the 48 hours before onset. Clay: a reading under the floor. Times in "
                 + run.manifest().zone()
                 + "."));

@@ -42,7 +42,10 @@ public final class EpisodesPage extends Page {
     middle.add(
         Html.paragraph(
             "lead",
-            Say.count(all, "episode") + " " + FilterWords.of(filter, names) + ", the latest first."));
+            Say.count(all, "episode")
+                + " "
+                + FilterWords.of(filter, names)
+                + ", the latest first."));
     middle.add(new FilterBar(filter, units));
     if (all == 0) {
       middle.add(
@@ -53,8 +56,7 @@ public final class EpisodesPage extends Page {
     return "Episodes";
   }
 
-  private static Component grid(
-      Run run, EpisodeFilter filter, Map<String, String> names, int all) {
+  private static Component grid(Run run, EpisodeFilter filter, Map<String, String> names, int all) {
     Clock clock = new Clock(run.manifest().zone());
     Grid<EpisodeRow> grid = new Grid<>();
     grid.addThemeVariants(GridVariant.LUMO_NO_BORDER, GridVariant.LUMO_WRAP_CELL_CONTENT);
@@ -69,8 +71,8 @@ public final class EpisodesPage extends Page {
     column(grid, "onset", 116, e -> clock.full(e.onsetAt()));
     column(grid, "unit", 140, e -> EpisodeWords.unit(e.unitAtOnset(), names));
     column(grid, "stage", 60, e -> Integer.toString(e.stage()));
-    column(grid, "origin", 106, EpisodeRow::origin);
-    column(grid, "evidence", 150, e -> EpisodeWords.evidence(e.evidence()));
+    column(grid, "origin", 118, EpisodeRow::origin);
+    column(grid, "evidence", 142, e -> EpisodeWords.evidence(e.evidence()));
     column(grid, "reference", 92, e -> Creatinine.MG.say(e.referenceNanomolesPerLitre()));
     column(grid, "peak, mg/dL", 76, e -> Creatinine.MG.say(e.peakNanomolesPerLitre()));
     column(grid, "linked agents", 152, e -> e.linkedAgents().replace(";", ", "));

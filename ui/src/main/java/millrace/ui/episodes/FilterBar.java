@@ -1,7 +1,7 @@
 package millrace.ui.episodes;
 
-import com.vaadin.flow.dom.Element;
 import com.vaadin.flow.component.html.Div;
+import com.vaadin.flow.dom.Element;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -9,7 +9,10 @@ import java.util.Optional;
 import millrace.analytics.mart.UnitRow;
 import millrace.ui.page.Query;
 
-/** A plain form whose values become the address; it works without anything of its own in the browser. */
+/**
+ * A plain form whose values become the address; it works without anything of its own in the
+ * browser.
+ */
 final class FilterBar extends Div {
   private static final long serialVersionUID = 1L;
 
@@ -41,14 +44,12 @@ final class FilterBar extends Div {
             Query.word(filter.recentHypotension()),
             same(List.of("yes", "no"))));
     form.appendChild(
-        select(
-            "counted", "counted", Query.word(filter.counted()), same(List.of("yes", "no"))));
+        select("counted", "counted", Query.word(filter.counted()), same(List.of("yes", "no"))));
     hidden(form, "attribution", filter.attribution());
     hidden(form, "drug", filter.drugClass());
     hidden(form, "linked", Query.word(filter.linked()));
     form.appendChild(new Element("button").setAttribute("type", "submit").setText("Show"));
-    form.appendChild(
-        new Element("a").setAttribute("href", "episodes").setText("all episodes"));
+    form.appendChild(new Element("a").setAttribute("href", "episodes").setText("all episodes"));
     getElement().appendChild(form);
   }
 

@@ -34,7 +34,8 @@ final class FilterWords {
         .ifPresent(
             d ->
                 words.add(
-                    (filter.linked().orElse(true) ? "linked to class " : "not linked to class ") + d));
+                    (filter.linked().orElse(true) ? "linked to class " : "not linked to class ")
+                        + d));
     return words.isEmpty() ? "of every month, class and origin" : String.join(", ", words);
   }
 }

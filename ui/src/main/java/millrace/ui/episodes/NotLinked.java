@@ -26,17 +26,14 @@ record NotLinked(String name, String reason, String rule) {
   private static final long SECONDS_OF_A_DAY = 86_400;
 
   static List<NotLinked> of(EpisodeData data) {
-    Set<String> linked =
-        data.links().stream().map(LinkRow::agent).collect(Collectors.toSet());
+    Set<String> linked = data.links().stream().map(LinkRow::agent).collect(Collectors.toSet());
     Map<String, List<DoseLine>> byName = new TreeMap<>();
     Set<String> notWatched = new java.util.TreeSet<>();
     for (DoseLine dose : data.dosesShown()) {
       if (dose.agent().isEmpty() && dose.note().equals(NOT_WATCHED)) {
         notWatched.add(drug(dose));
       } else if (!(dose.exposing() && dose.agent().filter(linked::contains).isPresent())) {
-        byName
-            .computeIfAbsent(drug(dose) + " " + dose.route(), n -> new ArrayList<>())
-            .add(dose);
+        byName.computeIfAbsent(drug(dose) + " " + dose.route(), n -> new ArrayList<>()).add(dose);
       }
     }
     List<NotLinked> all = new ArrayList<>();
@@ -72,7 +69,9 @@ record NotLinked(String name, String reason, String rule) {
     }
     DoseLine first = doses.get(0);
     DoseLine last =
-        doses.stream().max(Comparator.comparing(d -> d.endedAt().orElse(d.startedAt()))).orElseThrow();
+        doses.stream()
+            .max(Comparator.comparing(d -> d.endedAt().orElse(d.startedAt())))
+            .orElseThrow();
     Instant end = last.endedAt().orElse(last.startedAt());
     String rule = window(first) + " · methods 7";
     if (first.startedAt().isAfter(onset)) {
@@ -84,9 +83,7 @@ record NotLinked(String name, String reason, String rule) {
     if (first.startedAt().isAfter(onset.minusSeconds(first.lagSeconds()))) {
       return new NotLinked(
           name,
-          "first dose "
-              + Clock.span(first.startedAt(), onset)
-              + " before onset, inside the lag.",
+          "first dose " + Clock.span(first.startedAt(), onset) + " before onset, inside the lag.",
           rule);
     }
     if (!end.plusSeconds(last.lookBackSeconds()).isAfter(onset)) {

@@ -159,7 +159,14 @@ final class RawRows {
   private static DataTable replacements(EpisodeData data, Clock clock) {
     DataTable table =
         new DataTable(
-            "Kidney replacements", 6, "from", "to", "modality", "purpose", "masked until", "source");
+            "Kidney replacements",
+            6,
+            "from",
+            "to",
+            "modality",
+            "purpose",
+            "masked until",
+            "source");
     for (ReplacementLine r : data.replacements()) {
       table.row(
           clock.full(r.startedAt()),

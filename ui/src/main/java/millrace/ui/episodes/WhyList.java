@@ -86,6 +86,12 @@ final class WhyList {
                   : "The peak is " + unit.full(peak) + ", without a reference.")
               + episode.peakAt().map(t -> " " + clock.brief(t) + ".").orElse("");
     }
+    boolean replaced =
+        data.replacements().stream()
+            .anyMatch(r -> !r.purpose().equals("maintenance") && data.inside(r.startedAt()));
+    if (replaced && episode.peakNanomolesPerLitre().isPresent()) {
+      said += " A kidney replacement started inside it.";
+    }
     add(
         "Stage " + episode.stage(),
         "",
@@ -108,7 +114,9 @@ final class WhyList {
                         + ".")
             .orElse("The onset belongs to no admission.");
     add(
-        Character.toUpperCase(episode.origin().charAt(0)) + episode.origin().substring(1) + " onset",
+        Character.toUpperCase(episode.origin().charAt(0))
+            + episode.origin().substring(1)
+            + " onset",
         "",
         said,
         "border 48 h · methods 5");
@@ -127,7 +135,9 @@ final class WhyList {
         "",
         episode
                 .closedAt()
-                .map(c -> clock.brief(c) + ", " + Clock.span(episode.onsetAt(), c) + " after onset; ")
+                .map(
+                    c ->
+                        clock.brief(c) + ", " + Clock.span(episode.onsetAt(), c) + " after onset; ")
                 .orElse("Not before the end of the cover; ")
             + episode.course()
             + (episode.prolonged() ? ", prolonged." : "."),
@@ -150,12 +160,14 @@ final class WhyList {
             + Say.count(link.doses(), "dose")
             + " on "
             + Say.count(link.doseDays(), "day")
-            + ", the first "
-            + Clock.span(link.firstDoseAt(), episode.onsetAt())
-            + " and the last "
+            + (link.doses() == 1
+                ? ", "
+                : ", the first "
+                    + Clock.span(link.firstDoseAt(), episode.onsetAt())
+                    + " and the last ")
             + Clock.span(link.lastDoseAt(), episode.onsetAt())
             + " before onset.",
-        rule + " · " + link.mechanism() + " · methods 7");
+        rule + " · " + link.mechanism().replace(";", ", ") + " · methods 7");
   }
 
   private void pressure() {
@@ -186,7 +198,10 @@ final class WhyList {
     add(
         "Outcome",
         "",
-        episode.outcome().map(o -> o.replace('-', ' ') + " at discharge.").orElse("None: outside any admission."),
+        episode
+            .outcome()
+            .map(o -> o.replace('-', ' ') + " at discharge.")
+            .orElse("None: outside any admission."),
         "by the last result of the admission · methods 5");
   }
 }

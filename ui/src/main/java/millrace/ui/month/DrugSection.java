@@ -27,22 +27,13 @@ final class DrugSection {
 
   static Section of(Run run) {
     List<DrugRateRow> rows =
-        run
-            .rows(DrugRateRow.class, Condition.equal("level", "class"), "")
-            .stream()
+        run.rows(DrugRateRow.class, Condition.equal("level", "class"), "").stream()
             .sorted(
                 Comparator.comparingDouble((DrugRateRow r) -> -r.mhRatio().orElse(-1))
                     .thenComparing(Comparator.comparingLong(DrugRateRow::exposedSeconds).reversed())
                     .thenComparing(DrugRateRow::subject))
             .toList();
-    List<RatePoint> points = new ArrayList<>();
-    for (DrugRateRow r : rows) {
-      if (r.mhRatio().isPresent()) {
-        points.add(
-            new RatePoint(
-                r.subject(), r.mhRatio(), r.mhLower(), r.mhUpper(), r.rateRatio(), false));
-      }
-    }
+    List<RatePoint> points = points(rows);
     Section section =
         Html.section(
             "After which drugs",
@@ -52,8 +43,7 @@ final class DrugSection {
       section.add(
           new Chart(
               "Stratified rate ratio of each drug class with 95 % limits, and its crude ratio",
-              REST + ROW * points.size(),
-              RateCharts.ratios(points)));
+              REST + ROW * points.size(), RateCharts.ratios(points)));
     }
     List<DrugRateRow> seen = rows.stream().filter(r -> r.exposedSeconds() > 0).toList();
     section.add(table(seen));
@@ -82,6 +72,18 @@ final class DrugSection {
     return section;
   }
 
+  private static List<RatePoint> points(List<DrugRateRow> rows) {
+    List<RatePoint> points = new ArrayList<>();
+    for (DrugRateRow r : rows) {
+      if (r.mhRatio().isPresent()) {
+        points.add(
+            new RatePoint(
+                r.subject(), r.mhRatio(), r.mhLower(), r.mhUpper(), r.rateRatio(), false));
+      }
+    }
+    return points;
+  }
+
   private static DataTable table(List<DrugRateRow> rows) {
     DataTable table =
         new DataTable(
@@ -102,12 +104,10 @@ final class DrugSection {
       RiskSum other = new RiskSum(r.unexposedSeconds(), r.unexposedEpisodes(), 0);
       table.row(
           r.subject(),
-          Html.count(
-              r.exposedEpisodes(), EpisodeFilter.countedAfter(r.subject(), true).write()),
+          Html.count(r.exposedEpisodes(), EpisodeFilter.countedAfter(r.subject(), true).write()),
           Say.days(exposed.days()),
           Say.rate(Incidence.of(exposed).rate()),
-          Html.count(
-              r.unexposedEpisodes(), EpisodeFilter.countedAfter(r.subject(), false).write()),
+          Html.count(r.unexposedEpisodes(), EpisodeFilter.countedAfter(r.subject(), false).write()),
           Say.days(other.days()),
           Say.rate(Incidence.of(other).rate()),
           Say.ratio(r.rateRatio(), r.lower(), r.upper()),

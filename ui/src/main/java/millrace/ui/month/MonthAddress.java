@@ -22,8 +22,7 @@ public record MonthAddress(Optional<YearMonth> month, Attribution attribution) {
   /** Reads it. */
   public static MonthAddress read(Map<String, List<String>> values) {
     Query query = Query.of(values, Set.of(MONTH, ATTRIBUTION));
-    List<String> words =
-        List.of(Attribution.AT_ONSET.word(), Attribution.DAY_BEFORE.word());
+    List<String> words = List.of(Attribution.AT_ONSET.word(), Attribution.DAY_BEFORE.word());
     boolean dayBefore =
         query.word(ATTRIBUTION, words).filter(Attribution.DAY_BEFORE.word()::equals).isPresent();
     return new MonthAddress(
@@ -36,9 +35,7 @@ public record MonthAddress(Optional<YearMonth> month, Attribution attribution) {
     values.put(MONTH, month.map(YearMonth::toString));
     values.put(
         ATTRIBUTION,
-        attribution == Attribution.AT_ONSET
-            ? Optional.empty()
-            : Optional.of(attribution.word()));
+        attribution == Attribution.AT_ONSET ? Optional.empty() : Optional.of(attribution.word()));
     return Query.address("month", values);
   }
 
@@ -50,7 +47,6 @@ public record MonthAddress(Optional<YearMonth> month, Attribution attribution) {
   /** The same for the other attribution. */
   public MonthAddress other() {
     return new MonthAddress(
-        month,
-        attribution == Attribution.AT_ONSET ? Attribution.DAY_BEFORE : Attribution.AT_ONSET);
+        month, attribution == Attribution.AT_ONSET ? Attribution.DAY_BEFORE : Attribution.AT_ONSET);
   }
 }

@@ -33,8 +33,7 @@ public final class MonthFigures {
    * @param sum time and episodes
    * @param testsPerDay creatinine results per patient-day, empty without occupied time
    */
-  public record UnitFigure(
-      String unitId, String name, RiskSum sum, OptionalDouble testsPerDay) {
+  public record UnitFigure(String unitId, String name, RiskSum sum, OptionalDouble testsPerDay) {
     /** Incidence with its limits. */
     public Incidence incidence() {
       return Incidence.of(sum);
@@ -75,8 +74,7 @@ public final class MonthFigures {
   /** The hospital in the twelve months before. */
   public RiskSum yearBefore(YearMonth month) {
     String from = month.minusMonths(YEAR).toString();
-    return sum(
-        r -> r.month().compareTo(from) >= 0 && r.month().compareTo(month.toString()) < 0);
+    return sum(r -> r.month().compareTo(from) >= 0 && r.month().compareTo(month.toString()) < 0);
   }
 
   /** The hospital by month, of those with time or an episode. */

@@ -1,5 +1,6 @@
 package millrace.ui.month;
 
+import com.vaadin.flow.component.Component;
 import com.vaadin.flow.component.Text;
 import com.vaadin.flow.component.html.Anchor;
 import com.vaadin.flow.component.html.Div;
@@ -83,8 +84,9 @@ public final class MonthPage extends Page {
     }
     EpisodeFilter filter = EpisodeFilter.countedIn(month);
     Incidence now = Incidence.of(sum);
-    Anchor count = Html.link(filter.write(), Say.count(sum.episodes(), "hospital-onset episode"));
-    count.addClassName("strong");
+    String said = Say.count(sum.episodes(), "hospital-onset episode");
+    Component count =
+        sum.episodes() == 0 ? Html.span("strong", said) : strong(Html.link(filter.write(), said));
     lead.add(
         count,
         new Text(" in " + Say.days(sum.days()) + " patient-days at risk: "),
@@ -112,10 +114,22 @@ public final class MonthPage extends Page {
     return lead;
   }
 
+  private static Component strong(Anchor link) {
+    link.addClassName("strong");
+    return link;
+  }
+
   private static Div hospital(MonthFigures figures, YearMonth month, MonthAddress at) {
     DataTable table =
         new DataTable(
-            "The hospital by month", 1, "month", "episodes", "days", "rate", "95 % limits", "stage 2+");
+            "The hospital by month",
+            1,
+            "month",
+            "episodes",
+            "days",
+            "rate",
+            "95 % limits",
+            "stage 2+");
     List<RatePoint> points = new ArrayList<>();
     for (Map.Entry<YearMonth, RiskSum> entry : figures.months().entrySet()) {
       RiskSum sum = entry.getValue();
@@ -140,8 +154,7 @@ public final class MonthPage extends Page {
     Chart chart =
         new Chart(
             "Hospital-onset episodes per 1,000 patient-days at risk by month, with 95 % limits",
-            CHART,
-            RateCharts.upright(points));
+            CHART, RateCharts.upright(points));
     Div all = new Div();
     all.add(
         Html.section(

@@ -97,7 +97,8 @@ final class TrustSection {
   }
 
   private static DataTable table(List<FindingRow> findings) {
-    DataTable table = new DataTable("Findings, the most frequent first", 2, "finding", "where", "rows");
+    DataTable table =
+        new DataTable("Findings, the most frequent first", 2, "finding", "where", "rows");
     findings.forEach(
         f ->
             table.row(

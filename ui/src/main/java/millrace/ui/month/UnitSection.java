@@ -27,8 +27,7 @@ final class UnitSection {
     String other = MonthPage.words(at.other().attribution());
     Component turn =
         Html.div(
-            "step",
-            Html.link(at.other().write(), "count each by the unit " + other + " instead"));
+            "step", Html.link(at.other().write(), "count each by the unit " + other + " instead"));
     String say =
         "Episodes per 1,000 patient-days at risk, all on one scale, each by the unit "
             + MonthPage.words(at.attribution())
@@ -50,16 +49,10 @@ final class UnitSection {
             "results per patient-day");
     for (MonthFigures.UnitFigure unit : units) {
       Incidence rate = unit.incidence();
-      EpisodeFilter filter =
-          EpisodeFilter.countedIn(month).in(unit.unitId(), at.attribution());
+      EpisodeFilter filter = EpisodeFilter.countedIn(month).in(unit.unitId(), at.attribution());
       points.add(
           new RatePoint(
-              unit.name(),
-              rate.rate(),
-              rate.lower(),
-              rate.upper(),
-              OptionalDouble.empty(),
-              false));
+              unit.name(), rate.rate(), rate.lower(), rate.upper(), OptionalDouble.empty(), false));
       table.row(
           unit.name(),
           Html.count(unit.sum().episodes(), filter.write()),
@@ -71,7 +64,8 @@ final class UnitSection {
     }
     Chart chart =
         new Chart(
-            "Rate of each unit with 95 % limits", REST + ROW * points.size(), RateCharts.lying(points));
+            "Rate of each unit with 95 % limits",
+            REST + ROW * points.size(), RateCharts.lying(points));
     return Html.section("Where", say, turn, Html.div("cols", chart, table));
   }
 }

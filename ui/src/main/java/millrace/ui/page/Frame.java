@@ -62,8 +62,7 @@ public final class Frame {
     foot.add(
         new Paragraph(
             String.join(
-                " ",
-                manifest.cautions() == null ? Cautions.SENTENCES : manifest.cautions())));
+                " ", manifest.cautions() == null ? Cautions.SENTENCES : manifest.cautions())));
     Paragraph source = new Paragraph();
     source.add(
         new Span(

@@ -10,7 +10,8 @@ public class NotFoundPage extends Trouble implements HasErrorParameter<NotFoundE
   private static final long serialVersionUID = 1L;
 
   @Override
-  public int setErrorParameter(BeforeEnterEvent event, ErrorParameter<NotFoundException> parameter) {
+  public int setErrorParameter(
+      BeforeEnterEvent event, ErrorParameter<NotFoundException> parameter) {
     say(
         "There is no such page",
         "The served run has no page or episode at this address.",

@@ -58,12 +58,7 @@ public final class Say {
     if (value.isEmpty() && lower.isEmpty()) {
       return NONE;
     }
-    return ratio(value)
-        + " ("
-        + ratio(lower)
-        + "–"
-        + (upper.isEmpty() ? "∞" : ratio(upper))
-        + ")";
+    return ratio(value) + " (" + ratio(lower) + "–" + (upper.isEmpty() ? "∞" : ratio(upper)) + ")";
   }
 
   /** A small probability. */

@@ -82,7 +82,7 @@ public final class MartFixture {
     }
     Path part = mart.table(RUN, table).resolve("part-00000.parquet");
     try (Statement statement = connection.createStatement()) {
-      statement.execute("COPY t TO '" + part + "' (FORMAT parquet)");
+      statement.execute("COPY t TO '" + part.toString().replace("'", "''") + "' (FORMAT parquet)");
     }
   }
 
@@ -90,8 +90,7 @@ public final class MartFixture {
     Class<?> type = component.getType();
     if (type == Optional.class) {
       type =
-          (Class<?>)
-              ((ParameterizedType) component.getGenericType()).getActualTypeArguments()[0];
+          (Class<?>) ((ParameterizedType) component.getGenericType()).getActualTypeArguments()[0];
     }
     if (type == Instant.class) {
       return "TIMESTAMPTZ";
