@@ -10,7 +10,7 @@ import millrace.ui.chart.Json;
 /** Spans of time as bars. */
 final class BarAreas {
   /** Narrower than this share of the axis, a bar has no room for a name. */
-  private static final double ROOM_PER_LETTER = 0.0078;
+  private static final double ROOM_PER_LETTER = 0.0092;
 
   private final EpisodeData data;
   private final Clock clock;

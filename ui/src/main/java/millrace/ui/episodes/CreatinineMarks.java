@@ -108,10 +108,19 @@ final class CreatinineMarks {
         dot.put("symbolSize", 12);
         dot.putObject("label")
             .put("show", true)
-            .put("position", decision.equals("onset") ? "left" : "top")
+            .put("position", position(decision))
             .put("formatter", decision + " " + unit.say(r.nanomolesPerLitre()));
       }
     }
     return dots;
+  }
+
+  /** Where a name hides no other point. */
+  private static String position(String decision) {
+    return switch (decision) {
+      case "onset" -> "left";
+      case "closes" -> "right";
+      default -> "top";
+    };
   }
 }
