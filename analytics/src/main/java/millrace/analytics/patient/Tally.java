@@ -37,8 +37,7 @@ public final class Tally {
   /** Adds findings. */
   public void addFindings(Findings findings) {
     findings.forEach(
-        (key, rows) ->
-            add(Group.FINDING, key.kind().word(), key.table(), key.detail(), rows));
+        (key, rows) -> add(Group.FINDING, key.kind().word(), key.table(), key.detail(), rows));
   }
 
   /** A sum; 0 when nothing was added. */
