@@ -8,6 +8,8 @@ import millrace.analytics.policy.LinePolicy;
 import millrace.etl.check.CheckedPatient;
 import millrace.etl.record.Admission;
 import millrace.etl.record.BloodPressure;
+import millrace.etl.record.CreatinineResult;
+import millrace.etl.record.KidneyReplacement;
 import millrace.etl.record.Patient;
 import millrace.etl.record.Seconds;
 import millrace.etl.record.Sex;
@@ -16,6 +18,9 @@ import millrace.etl.record.UnitStay;
 
 /** Timelines of invented patients, built as a run builds them. */
 public final class Timelines {
+  private static final Patient PATIENT =
+      new Patient("p", Sex.FEMALE, LocalDate.of(1960, 1, 1), Seconds.ABSENT, new SourceLine(0, 2));
+
   private Timelines() {}
 
   /** A timeline of admissions, stays and pressures; the arrival window is 20 s. */
@@ -24,19 +29,36 @@ public final class Timelines {
       List<UnitStay> stays,
       List<BloodPressure> pressures,
       long coversTo) {
-    Patient patient =
-        new Patient(
-            "p", Sex.FEMALE, LocalDate.of(1960, 1, 1), Seconds.ABSENT, new SourceLine(0, 2));
     return new TimelineBuilder(new LinePolicy(10, 20), coversTo)
         .build(
             new CheckedPatient(
-                Optional.of(patient),
+                Optional.of(PATIENT),
                 admissions,
                 stays,
                 List.of(),
                 List.of(),
                 pressures,
                 List.of(),
+                List.of(),
+                List.of(),
+                List.of()));
+  }
+
+  /** A timeline of admissions, results and replacements; the washout is 10 s. */
+  public static PatientTimeline of(
+      List<Admission> admissions,
+      List<CreatinineResult> results,
+      List<KidneyReplacement> replacements) {
+    return new TimelineBuilder(new LinePolicy(10, 20), Long.MAX_VALUE)
+        .build(
+            new CheckedPatient(
+                Optional.of(PATIENT),
+                admissions,
+                List.of(),
+                results,
+                List.of(),
+                List.of(),
+                replacements,
                 List.of(),
                 List.of(),
                 List.of()));

@@ -1,7 +1,10 @@
 package millrace.analytics.command;
 
+import static millrace.analytics.command.OneLine.CONTRACT_BROKEN;
+import static millrace.analytics.command.OneLine.SECRET;
+import static millrace.analytics.command.OneLine.WRONG_CALL;
+import static millrace.analytics.command.OneLine.assertOneLine;
 import static org.junit.jupiter.api.Assertions.assertEquals;
-import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.ByteArrayOutputStream;
@@ -27,16 +30,11 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
-import org.junit.jupiter.params.provider.ValueSource;
 
-/** Bad input: one line that says what, where and the mend, and a mart that is untouched. */
-final class BadInputTest {
-  /** Stands in a row of every extract here, and in no message. */
-  private static final String SECRET = "Confidential-Person-77";
-
-  private static final int WRONG_CALL = 2;
-  private static final int CONTRACT_BROKEN = 3;
-
+/**
+ * A bad extract or mart: one line that says what, where and the mend, and a mart that is untouched.
+ */
+final class BadExtractTest {
   @TempDir private static Path shared;
   private static Path mart;
 
@@ -88,18 +86,6 @@ final class BadInputTest {
 
   private CommandLineRun run() {
     return CommandLineRun.of("run", "--extract", extract, "--mart", mart, "--master", "local[2]");
-  }
-
-  private static void assertOneLine(CommandLineRun call, int status, String... words) {
-    assertEquals(1, call.messages().size(), call::err);
-    String line = call.messages().get(0);
-    assertTrue(line.startsWith("millrace: "), line);
-    for (String word : words) {
-      assertTrue(line.contains(word), () -> "lacks " + word + ": " + line);
-    }
-    assertFalse(line.contains("Exception"), line);
-    assertFalse(line.contains(SECRET), line);
-    assertEquals(status, call.status(), line);
   }
 
   private void replaceInDescriptor(String old, String other) throws IOException {
@@ -263,137 +249,5 @@ final class BadInputTest {
       assertOneLine(run(), WRONG_CALL, mart.toString(), "another run", "wait");
       assertTrue(Files.exists(mart.resolve(".writing")), lock::toString);
     }
-  }
-
-  @ParameterizedTest
-  @CsvSource(
-      delimiter = '|',
-      value = {
-        "min_agee: 18 | no setting min_agee; did you mean min_age?",
-        "something_else_entirely: 1 | the command policy prints all settings",
-        "min_age: eighteen | min_age is eighteen; write a whole number",
-        "min_age: -1 | min_age is -1; write a whole number, 0 or more",
-        "lapse: 90 | lapse is 90; write a whole number and a unit",
-        "lapse: 90 weeks | lapse is 90 weeks",
-        "baseline: lowest | baseline is lowest; write one of outpatient-median",
-        "ordered_doses: yes | write one of ignore, count",
-        "stratify_by_month: 1 | write true or false",
-        "vasopressors: C01CA03 | write a list",
-        "hold: 15 min | write a map with critical-care",
-        "watchlist: missing.csv | missing.csv cannot be read",
-        "'[1, 2]' | no list of settings",
-        "'min_age: [18' | line 1",
-        "'{min_age: 18, min_age: 19}' | min_age"
-      })
-  void policyThatCannotBeUsed(String text, String message) throws IOException {
-    Path policy = Files.writeString(folder.resolve("policy.yaml"), text);
-
-    assertOneLine(
-        CommandLineRun.of("run", "--extract", extract, "--mart", mart, "--policy", policy),
-        WRONG_CALL,
-        text.contains("watchlist") ? "missing.csv" : "policy.yaml",
-        message);
-  }
-
-  @Test
-  void policyThatIsNotThere() {
-    assertOneLine(
-        CommandLineRun.of("run", "--extract", extract, "--mart", mart, "--policy", "none.yaml"),
-        WRONG_CALL,
-        "none.yaml cannot be read",
-        "check its name");
-  }
-
-  @Test
-  void optionThatDoesNotExist() {
-    assertOneLine(
-        CommandLineRun.of("run", "--extract", extract, "--mart", mart, "--polcy", "p.yaml"),
-        WRONG_CALL,
-        "--polcy",
-        "did you mean --policy?",
-        "millrace run --help");
-  }
-
-  @Test
-  void optionThatIsMissing() {
-    assertOneLine(
-        CommandLineRun.of("run", "--mart", mart), WRONG_CALL, "--extract", "millrace run --help");
-  }
-
-  @ParameterizedTest
-  @ValueSource(strings = {"rum", "analyse"})
-  void commandThatDoesNotExist(String command) {
-    assertOneLine(CommandLineRun.of(command), WRONG_CALL, command, "millrace --help");
-  }
-
-  @Test
-  void masterThatDoesNotExist() {
-    CommandLineRun call =
-        CommandLineRun.of("run", "--extract", extract, "--mart", mart, "--master", "nowhere:1");
-
-    assertEquals(1, call.messages().size(), call::err);
-    assertTrue(call.status() == 2 || call.status() == 4, call::err);
-    assertFalse(call.err().contains("\tat "), call::err);
-  }
-
-  @Test
-  void exportOfATableThatDoesNotExist() {
-    assertOneLine(
-        CommandLineRun.of(
-            "export", "--mart", mart, "--table", "episode", "--out", folder.resolve("e.csv")),
-        WRONG_CALL,
-        "no table episode",
-        "the tables are",
-        "episodes");
-  }
-
-  @Test
-  void exportOfAMartWithoutARun() {
-    assertOneLine(
-        CommandLineRun.of(
-            "export", "--mart", folder, "--table", "flow", "--out", folder.resolve("f.csv")),
-        WRONG_CALL,
-        folder.toString(),
-        "serves no run",
-        "command run");
-  }
-
-  @Test
-  void exportOfARunThatDoesNotExist() {
-    assertOneLine(
-        CommandLineRun.of(
-            "export",
-            "--mart",
-            mart,
-            "--table",
-            "flow",
-            "--out",
-            folder.resolve("f.csv"),
-            "--run",
-            "r-1"),
-        WRONG_CALL,
-        "no published run r-1",
-        "command runs");
-  }
-
-  @Test
-  void exportIntoAFolderThatIsNotThere() {
-    assertOneLine(
-        CommandLineRun.of(
-            "export", "--mart", mart, "--table", "flow", "--out", folder.resolve("no/f.csv")),
-        WRONG_CALL,
-        "f.csv",
-        "cannot be written",
-        "--out");
-  }
-
-  @Test
-  void runsOfAMartThatIsNotThere() {
-    assertOneLine(
-        CommandLineRun.of("runs", "--mart", folder.resolve("none")),
-        WRONG_CALL,
-        "none",
-        "no folder",
-        "mart");
   }
 }
